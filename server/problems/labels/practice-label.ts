@@ -31,7 +31,11 @@ export type LabelRate = {
       readonly water?: Span;
       readonly area: Quantity;
     }
-  | { /** Product for each `mix` of finished spray. */ readonly basis: 'mix'; readonly product: Span; readonly mix: Quantity }
+  | {
+      /** Product for each `mix` of finished spray. */ readonly basis: 'mix';
+      readonly product: Span;
+      readonly mix: Quantity;
+    }
   | { /** Percent by volume of the finished spray. */ readonly basis: 'percent'; readonly percent: Span }
   | { /** Used as it comes. */ readonly basis: 'ready' }
 );
