@@ -1,0 +1,28 @@
+import type { Family } from './family.ts';
+
+// One line a family: import it here and add it to the list. Old versions stay listed below the current ones.
+
+const current: readonly Family<never>[] = [];
+const old: readonly Family<never>[] = [];
+
+const byKey = new Map<string, Family<unknown>>();
+const byVersion = new Map<string, Family<unknown>>();
+for (const family of current as unknown as readonly Family<unknown>[]) {
+  if (byKey.has(family.key)) throw new Error(`two families are called ${family.key}`);
+  byKey.set(family.key, family);
+  byVersion.set(`${family.key}@${family.version}`, family);
+}
+for (const family of old as unknown as readonly Family<unknown>[]) byVersion.set(`${family.key}@${family.version}`, family);
+
+/** All current families, in the order of the registry. */
+export const families: readonly Family<unknown>[] = [...byKey.values()];
+
+/** The current version of a family; undefined when there is none of this name. */
+export function familyByKey(key: string): Family<unknown> | undefined {
+  return byKey.get(key);
+}
+
+/** A family in a given version, old ones included; undefined when there is none. */
+export function familyVersion(key: string, version: number): Family<unknown> | undefined {
+  return byVersion.get(`${key}@${version}`);
+}
