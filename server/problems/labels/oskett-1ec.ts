@@ -1,7 +1,7 @@
 import { quantity } from '../../../shared/quantity/quantity.ts';
 import { firstAid, headings, ppe, precautions, reentry, storage, types } from './common-lines.ts';
 import type { PracticeLabel } from './practice-label.ts';
-import { perAcre, perGallon, percentMix } from './rate-lines.ts';
+import { perAcre, perGallon, perSqFt, percentMix } from './rate-lines.ts';
 
 /** Practice label. Not a real product. */
 export const oskett1ec: PracticeLabel = {
@@ -13,7 +13,10 @@ export const oskett1ec: PracticeLabel = {
   active: { en: 'Zelpharonil, 1 lb per gallon', es: 'Zelpharonil, 1 lb por galón' },
   strength: quantity('1', 'lb/gal'),
   signalWord: 'DANGER',
-  sites: { en: 'Ornamental shrubs, trees, sports turf', es: 'Arbustos ornamentales, árboles, campos deportivos' },
+  sites: {
+    en: 'Ornamental shrubs, trees, paving, lawns, sports turf',
+    es: 'Arbustos ornamentales, árboles, pavimento, césped residencial, campos deportivos',
+  },
   pests: { en: 'Caterpillars, lace bugs, billbugs', es: 'Orugas, chinches de encaje, picudos del césped' },
   rates: [
     perGallon({
@@ -26,6 +29,7 @@ export const oskett1ec: PracticeLabel = {
     }),
     perGallon({ key: 'trees', site: 'trees', heading: headings.trees, product: '1.5', unit: 'fl-oz' }),
     percentMix({ key: 'paving', site: 'paving', heading: headings.paving, percent: '0.5' }),
+    perSqFt({ key: 'lawns', site: 'lawn', heading: headings.lawns, product: '0.6', unit: 'fl-oz', waterGal: '2' }),
     perAcre({ key: 'turf', site: 'turf', heading: headings.turf, product: '1.5', unit: 'pt', waterGal: '50' }),
   ],
   limit: { applications: 2, daysApart: 30 },

@@ -14,8 +14,8 @@ export const tevlinSc: PracticeLabel = {
   strength: quantity('1.7', 'lb/gal'),
   signalWord: 'CAUTION',
   sites: {
-    en: 'Lawns, parks and sports turf, ornamental shrubs',
-    es: 'Césped residencial, parques y campos deportivos, arbustos ornamentales',
+    en: 'Lawns, parks and sports turf, ornamental shrubs, beds',
+    es: 'Césped residencial, parques y campos deportivos, arbustos ornamentales, arriates',
   },
   pests: { en: 'Brown patch, dollar spot, leaf spot', es: 'Mancha café, mancha de dólar, mancha foliar' },
   rates: [
@@ -36,6 +36,7 @@ export const tevlinSc: PracticeLabel = {
       product: ['1.5', '2'],
       unit: 'tbsp',
     }),
+    perSqFt({ key: 'beds', site: 'bed', heading: headings.beds, product: '3', unit: 'fl-oz', waterGal: '4' }),
   ],
   limit: { applications: 4, daysApart: 14 },
   wind: { mostMph: 10, waterBufferFt: 25 },

@@ -1,0 +1,39 @@
+import { formatNumber, formatQuantity, unitWord } from '../../shared/quantity/format.ts';
+import type { Quantity } from '../../shared/quantity/quantity.ts';
+import { rational, type Rational } from '../../shared/quantity/rational.ts';
+import type { Locale, Text } from '../../shared/vocabulary.ts';
+
+/** What can stand in a sentence: a quantity or number is written in the sentence's language, a text taken in it. */
+export type Sayable = string | number | Rational | Quantity | Text;
+
+function spoken(value: Sayable, locale: Locale): string {
+  if (typeof value === 'string') return value;
+  if (typeof value === 'number') return formatNumber(rational(value), { locale });
+  if ('en' in value) return value[locale];
+  if ('unit' in value) return formatQuantity(value, { locale });
+  return formatNumber(value, { locale });
+}
+
+function sentence(locale: Locale) {
+  return (words: TemplateStringsArray, ...values: readonly Sayable[]): string =>
+    words.reduce((said, next, at) => said + spoken(values[at - 1] as Sayable, locale) + next);
+}
+
+/** Template tags: en`Take off ${area}.` writes the area as US English does. */
+export const en = sentence('en');
+export const es = sentence('es');
+
+/** A quantity rounded to at most `maxPlaces`, for a sentence. */
+export function rounded(value: Quantity, maxPlaces: number): Text {
+  return {
+    en: formatQuantity(value, { locale: 'en', maxPlaces }),
+    es: formatQuantity(value, { locale: 'es', maxPlaces }),
+  };
+}
+
+/** A quantity with its unit written out, as at first use: "62 feet", "1 fluid ounce". */
+export function inWords(value: Quantity): Text {
+  const text = (locale: Locale) =>
+    `${formatNumber(value.value, { locale })} ${unitWord(value.unit, { locale, value: value.value })}`;
+  return { en: text('en'), es: text('es') };
+}
