@@ -1,3 +1,4 @@
+import Fraction from 'fraction.js';
 import { formatNumber, formatQuantity, unitSymbol } from '../../shared/quantity/format.ts';
 import type { Quantity } from '../../shared/quantity/quantity.ts';
 import type { Locale } from '../../shared/vocabulary.ts';
@@ -65,7 +66,7 @@ export function describeGiven(value: unknown): unknown {
   if (value === null || typeof value !== 'object') return typeof value === 'bigint' ? String(value) : value;
   if (Array.isArray(value)) return value.map(describeGiven);
   if (isQuantity(value)) return describeQuantity(value);
-  if ('n' in value && 'd' in value && 's' in value) return (value as { toFraction(): string }).toFraction();
+  if (value instanceof Fraction) return value.toFraction();
   return Object.fromEntries(Object.entries(value).map(([key, inner]) => [key, describeGiven(inner)]));
 }
 

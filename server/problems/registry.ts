@@ -1,8 +1,21 @@
 import type { Family } from './family.ts';
+import { areaCircleFamily } from './families/area/area-circle.ts';
+import { areaLShapeFamily } from './families/area/area-l-shape.ts';
+import { areaRectangleLessFamily } from './families/area/area-rectangle-less.ts';
+import { areaRectangleFamily } from './families/area/area-rectangle.ts';
+import { areaTriangleFamily } from './families/area/area-triangle.ts';
+import { rateLabelBaseFamily } from './families/rate/rate-label-base.ts';
 
 // One line a family: import it here and add it to the list. Old versions stay listed below the current ones.
 
-const current: readonly Family<never>[] = [];
+const current: readonly Family<never>[] = [
+  areaRectangleFamily,
+  areaRectangleLessFamily,
+  areaLShapeFamily,
+  areaTriangleFamily,
+  areaCircleFamily,
+  rateLabelBaseFamily,
+];
 const old: readonly Family<never>[] = [];
 
 const byKey = new Map<string, Family<unknown>>();
@@ -12,7 +25,8 @@ for (const family of current as unknown as readonly Family<unknown>[]) {
   byKey.set(family.key, family);
   byVersion.set(`${family.key}@${family.version}`, family);
 }
-for (const family of old as unknown as readonly Family<unknown>[]) byVersion.set(`${family.key}@${family.version}`, family);
+for (const family of old as unknown as readonly Family<unknown>[])
+  byVersion.set(`${family.key}@${family.version}`, family);
 
 /** All current families, in the order of the registry. */
 export const families: readonly Family<unknown>[] = [...byKey.values()];

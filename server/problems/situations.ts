@@ -1,4 +1,5 @@
 import type { Text } from '../../shared/vocabulary.ts';
+import type { Rng } from './rng.ts';
 
 /** First names of mixed origins for the people in problems. No one real is meant. */
 export const people = [
@@ -88,4 +89,35 @@ export const seasons: readonly Text[] = [
 export function capital(text: Text): Text {
   const large = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
   return { en: large(text.en), es: large(text.es) };
+}
+
+/** Who does the work, where and when, and which of a family's ways of telling it is used. */
+export interface Scene {
+  readonly situation: number;
+  readonly person: string;
+  readonly place: Place;
+  readonly season: Text;
+}
+
+/** Draws a scene for a family that tells its problem in `situations` ways. */
+export function drawScene(rng: Rng, situations: number): Scene {
+  return {
+    situation: rng.int(0, situations - 1),
+    person: rng.pick(people),
+    place: rng.pick(places),
+    season: rng.pick(seasons),
+  };
+}
+
+/** One way of telling a problem of some kind. */
+export interface Situation<G> {
+  readonly heading: Text;
+  readonly statement: (given: G) => Text;
+}
+
+/** The situation a scene was drawn for. @throws RangeError when there is none of this number. */
+export function situationOf<G extends Scene>(situations: readonly Situation<G>[], given: G): Situation<G> {
+  const found = situations[given.situation];
+  if (!found) throw new RangeError(`no situation ${given.situation}`);
+  return found;
 }

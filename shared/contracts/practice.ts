@@ -98,6 +98,8 @@ export interface LevelView {
   /** Predicted share right on an average tier-2 problem of the topic, and its 80 % range; null while not started. */
   fill: number | null;
   range: { low: number; high: number } | null;
+  /** Tiers that problems of this topic come in; empty where none can be drilled yet. */
+  tiers: Tier[];
 }
 
 export interface AnswerReply {
@@ -122,3 +124,44 @@ export interface DrillView {
 
 export const localeSchema = z.enum(locales);
 export const verdictSchema = z.enum(verdicts);
+
+/** Slips a person makes, most frequent first. */
+export interface SlipView {
+  topic: Topic;
+  family: string;
+  familyTitle: string;
+  slip: string;
+  /** What the slip is, in a few words: the first sentence of its message on a sample. */
+  headline: string;
+  times: number;
+  lastAt: string;
+}
+
+export interface ProgressView {
+  levels: LevelView[];
+  answered: number;
+  right: number;
+  seconds: number;
+  slips: SlipView[];
+  /** Days with answers, oldest first, the last 60 at most. */
+  days: { date: string; answered: number; right: number }[];
+}
+
+export const newCheckpointBodySchema = z.object({
+  family: z.string().min(1).max(60),
+  tier: z.union([z.literal(1), z.literal(2), z.literal(3)]),
+  fresh: z.boolean().default(false),
+});
+
+export const sampleAnswerBodySchema = z.object({
+  /** Which sample: its opaque id from the sample itself. */
+  sample: z.string().min(1).max(40),
+  part: z.enum(partKeys),
+  response: responseSchema,
+});
+
+/** A graded answer to a visitor's sample problem; nothing of it is kept. */
+export interface SampleReply {
+  unreadable: { code: string; message: string } | null;
+  attempt: AttemptView | null;
+}

@@ -1,6 +1,8 @@
 import { sql } from 'drizzle-orm';
 import {
+  boolean,
   check,
+  date,
   doublePrecision,
   index,
   integer,
@@ -12,7 +14,6 @@ import {
   timestamp,
   unique,
   uuid,
-  date,
 } from 'drizzle-orm/pg-core';
 import type { Context, PartKey, Tier, Topic, Verdict } from '../../../shared/vocabulary.ts';
 
@@ -32,7 +33,6 @@ export const drill = pgTable(
     tier: text('tier').$type<'1' | '2' | '3' | 'rising'>().notNull(),
     length: smallint('length').notNull(),
     createdAt: moment('created_at').notNull().defaultNow(),
-    finishedAt: moment('finished_at'),
   },
   (table) => [
     primaryKey({ columns: [table.userId, table.id] }),
@@ -56,8 +56,8 @@ export const problem = pgTable(
     position: smallint('position'),
     lesson: text('lesson'),
     checkpoint: text('checkpoint'),
-    /** Hints shown so far, by part. */
-    hints: jsonb('hints').$type<Partial<Record<PartKey, number>>>().notNull().default({}),
+    /** Hints shown so far, 0 to 3. */
+    hints: smallint('hints').notNull().default(0),
     shownAt: moment('shown_at').notNull().defaultNow(),
     closedAt: moment('closed_at'),
   },
@@ -91,7 +91,7 @@ export const answer = pgTable(
     slip: text('slip'),
     attempt: smallint('attempt').notNull(),
     /** Whether it is the first answer to the part, the one that counts for the level. */
-    isFirst: smallint('is_first').notNull(),
+    isFirst: boolean('is_first').notNull(),
     hints: smallint('hints').notNull(),
     /** Options to choose from; 0 when the answer was entered. */
     choices: smallint('choices').notNull(),

@@ -1,0 +1,52 @@
+import { rational, type Rational } from './rational.ts';
+import { units, type UnitKey } from './units.ts';
+
+/** An exact value with its unit. */
+export interface Quantity {
+  readonly value: Rational;
+  readonly unit: UnitKey;
+}
+
+export function quantity(value: number | string | bigint | Rational, unit: UnitKey): Quantity {
+  return { value: rational(value), unit };
+}
+
+/** The number after conversion to `unit`. @throws RangeError when the two measure different kinds of things */
+export function inUnit(q: Quantity, unit: UnitKey): Rational {
+  if (q.unit === unit) return q.value;
+  const from = units[q.unit];
+  const to = units[unit];
+  if (from.kind !== to.kind) throw new RangeError(`cannot convert ${from.kind} (${q.unit}) to ${to.kind} (${unit})`);
+  let value = q.value.mul(from.toBase);
+  if (from.offset) value = value.add(from.offset);
+  if (to.offset) value = value.sub(to.offset);
+  return value.div(to.toBase);
+}
+
+/** The same amount in another unit. @throws RangeError when the kinds differ */
+export function convert(q: Quantity, unit: UnitKey): Quantity {
+  return { value: inUnit(q, unit), unit };
+}
+/** Sum, in the first one's unit. @throws RangeError when the kinds differ */
+export function add(a: Quantity, b: Quantity): Quantity {
+  return { value: a.value.add(inUnit(b, a.unit)), unit: a.unit };
+}
+/** Difference, in the first one's unit. @throws RangeError when the kinds differ */
+export function subtract(a: Quantity, b: Quantity): Quantity {
+  return { value: a.value.sub(inUnit(b, a.unit)), unit: a.unit };
+}
+/** The quantity times a plain number. */
+export function scale(q: Quantity, by: Rational | number | string): Quantity {
+  return { value: q.value.mul(rational(by)), unit: q.unit };
+}
+/** How many times `b` goes into `a`. @throws RangeError when the kinds differ; Error on a zero `b` */
+export function ratio(a: Quantity, b: Quantity): Rational {
+  return a.value.div(inUnit(b, a.unit));
+}
+/** -1, 0 or 1 as `a` is less than, equal to or more than `b`. @throws RangeError when the kinds differ */
+export function compare(a: Quantity, b: Quantity): -1 | 0 | 1 {
+  return Math.sign(a.value.compare(inUnit(b, a.unit))) as -1 | 0 | 1;
+}
+export function sameKind(a: Quantity, b: Quantity): boolean {
+  return units[a.unit].kind === units[b.unit].kind;
+}
