@@ -1,6 +1,7 @@
-import { formatNumber, formatQuantity, unitWord } from '../../shared/quantity/format.ts';
+import { formatNumber, formatQuantity, unitSymbol, unitWord } from '../../shared/quantity/format.ts';
 import type { Quantity } from '../../shared/quantity/quantity.ts';
 import { rational, type Rational } from '../../shared/quantity/rational.ts';
+import type { UnitKey } from '../../shared/quantity/units.ts';
 import type { Locale, Text } from '../../shared/vocabulary.ts';
 
 /** What can stand in a sentence: a quantity or number is written in the sentence's language, a text taken in it. */
@@ -36,4 +37,24 @@ export function inWords(value: Quantity): Text {
   const text = (locale: Locale) =>
     `${formatNumber(value.value, { locale })} ${unitWord(value.unit, { locale, value: value.value })}`;
   return { en: text('en'), es: text('es') };
+}
+
+/** A unit as at first use, many of it: "square feet (sq ft)"; only the word where word and symbol are the same. */
+export function unitFirst(unit: UnitKey): Text {
+  const text = (locale: Locale) => withSymbol(unitWord(unit, { locale }), unitSymbol(unit, { locale }));
+  return { en: text('en'), es: text('es') };
+}
+
+/** A quantity as at first use: "62 feet (ft)". */
+export function firstUse(value: Quantity): Text {
+  const text = (locale: Locale) => {
+    const options = { locale, value: value.value };
+    const unit = withSymbol(unitWord(value.unit, options), unitSymbol(value.unit, options));
+    return `${formatNumber(value.value, { locale })} ${unit}`;
+  };
+  return { en: text('en'), es: text('es') };
+}
+
+function withSymbol(word: string, symbol: string): string {
+  return word === symbol || symbol === '' ? word : `${word} (${symbol})`;
 }

@@ -66,7 +66,7 @@ export const places: readonly Place[] = [
   place('church', 'church', 'la', 'iglesia'),
   place('apartment-block', 'apartment building', 'el', 'edificio de apartamentos'),
   place('office-park', 'office park', 'el', 'parque de oficinas'),
-  place('cemetery', 'cemetery', 'el', 'cementerio'),
+  place('community-center', 'community center', 'el', 'centro comunitario'),
   place('museum', 'museum', 'el', 'museo'),
   place('fire-station', 'fire station', 'la', 'estación de bomberos'),
   place('community-garden', 'community garden', 'el', 'jardín comunitario'),

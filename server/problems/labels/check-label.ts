@@ -1,6 +1,6 @@
 import { inUnit, type Quantity } from '../../../shared/quantity/quantity.ts';
 import { rational } from '../../../shared/quantity/rational.ts';
-import { unitKind, type UnitKey } from '../../../shared/quantity/units.ts';
+import { kindOf, type UnitKey } from '../../../shared/quantity/units.ts';
 import type { LabelRate, PracticeLabel, Span } from './practice-label.ts';
 
 /** Least and most a rate may be, both included, in `unit`. */
@@ -40,7 +40,7 @@ function checkSpan(span: Span, range: Range, times = rational(1)): string[] {
 
 function productRange(rate: Extract<LabelRate, { basis: 'area' }>, label: PracticeLabel): Range {
   const acre = rate.area.unit === 'acre';
-  if (unitKind(rate.product.least.unit) === 'volume') return acre ? ranges.liquidPerAcre : ranges.liquidPerThousand;
+  if (kindOf(rate.product.least.unit) === 'volume') return acre ? ranges.liquidPerAcre : ranges.liquidPerThousand;
   if (acre) return ranges.dryPerAcre;
   return label.formulation === 'G' || label.formulation === 'bait' ? ranges.granulesPerThousand : ranges.dryPerThousand;
 }

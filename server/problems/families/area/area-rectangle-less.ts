@@ -1,0 +1,218 @@
+import { add, quantity, scale, subtract, type Quantity } from '../../../../shared/quantity/quantity.ts';
+import { rational } from '../../../../shared/quantity/rational.ts';
+import type { Text, Tier } from '../../../../shared/vocabulary.ts';
+import { defineFamily, type Slip } from '../../family.ts';
+import type { Rng } from '../../rng.ts';
+import { en, es, firstUse } from '../../say.ts';
+import { drawScene, situationOf, type Scene, type Situation } from '../../situations.ts';
+import {
+  lawnFigure,
+  lawnWorking,
+  listed,
+  obstacleArea,
+  obstacleName,
+  obstacleSides,
+  placeObstacles,
+  sumOf,
+  treatedArea,
+  wholeLawn,
+  type LawnWithObstacles,
+  type Obstacle,
+} from './obstacles.ts';
+import { areaUnits, oneSqFt } from './plan-parts.ts';
+
+interface Given extends Scene, LawnWithObstacles {}
+
+/** "The lawn is 62 feet (ft) by 35 ft; the patio is 20 ft by 10 ft." */
+function measures(g: Given): Text {
+  return {
+    en: en`The lot is ${firstUse(g.length)} by ${g.width}; ${obstacleSides(g)}.`,
+    es: es`El terreno mide ${firstUse(g.length)} por ${g.width}; ${obstacleSides(g)}.`,
+  };
+}
+const names = (g: Given) => listed(g.obstacles.map(obstacleName));
+
+const situations: readonly Situation<Given>[] = [
+  {
+    heading: { en: 'A lawn, less what stands on it', es: 'Un césped, menos lo que hay encima' },
+    statement: (g) => ({
+      en: en`${g.person} sprays all the grass on a lot, but not ${names(g)}. ${measures(g)}`,
+      es: es`${g.person} rocía todo el pasto de un terreno, pero no ${names(g)}. ${measures(g)}`,
+    }),
+  },
+  {
+    heading: { en: 'Turf to treat', es: 'El césped por tratar' },
+    statement: (g) => ({
+      en: en`The grass around ${names(g)} gets treated ${g.season}. ${measures(g)} Find the grass area.`,
+      es: es`El pasto alrededor de lo construido se trata ${g.season}. ${measures(g)} Halle el área de pasto.`,
+    }),
+  },
+  {
+    heading: { en: 'A work order without an area', es: 'Una orden de trabajo sin área' },
+    statement: (g) => ({
+      en: en`A work order says "all turf." ${g.person} measures the lot. ${measures(g)} The rest is turf.`,
+      es: es`Una orden de trabajo dice «todo el césped». ${g.person} mide el terreno. ${measures(g)} El resto es césped.`,
+    }),
+  },
+  {
+    heading: { en: 'Only the grass', es: 'Solo el pasto' },
+    statement: (g) => ({
+      en: en`Granules must not land on ${names(g)}, so ${g.person} counts only the grass. ${measures(g)}`,
+      es: es`Los gránulos no deben caer fuera del pasto, así que ${g.person} cuenta solo el pasto. ${measures(g)}`,
+    }),
+  },
+];
+
+const layouts: Record<Tier, readonly (readonly Obstacle['kind'][])[]> = {
+  1: [['patio'], ['terrace'], ['shed'], ['playground'], ['pond'], ['bed']],
+  2: [
+    ['house', 'driveway'],
+    ['patio', 'bed'],
+    ['playground', 'shed'],
+    ['terrace', 'pond'],
+    ['house', 'patio'],
+  ],
+  3: [
+    ['house', 'driveway', 'patio'],
+    ['driveway', 'house', 'shed'],
+    ['bed', 'house', 'driveway'],
+    ['playground', 'terrace', 'pond'],
+  ],
+};
+const lengthFt: Record<Tier, readonly [number, number]> = { 1: [40, 80], 2: [70, 110], 3: [100, 150] };
+const widthFt: Record<Tier, readonly [number, number]> = { 1: [26, 50], 2: [50, 75], 3: [60, 90] };
+/** An obstacle too small to tell whether it was left out teaches nothing. */
+const leastShare = rational(4, 100);
+
+function draw(rng: Rng, tier: Tier): Given | null {
+  const scene = drawScene(rng, situations.length);
+  const length = rng.int(...lengthFt[tier]);
+  const width = rng.int(...widthFt[tier]);
+  const obstacles = placeObstacles(rng, { lengthFt: length, widthFt: width }, rng.pick(layouts[tier]));
+  if (!obstacles) return null;
+  const g = { ...scene, length: quantity(length, 'ft'), width: quantity(width, 'ft'), obstacles };
+  const least = wholeLawn(g).value.mul(leastShare);
+  return g.obstacles.every((one) => obstacleArea(one).value.compare(least) >= 0) ? g : null;
+}
+
+const obstructed = (g: Given) => sumOf(g.obstacles.map(obstacleArea));
+const around = (one: Obstacle) => scale(add(one.length, one.width), 2);
+const last = (g: Given) => g.obstacles.at(-1);
+
+const slips: readonly Slip<Given>[] = [
+  {
+    key: 'left-in-obstacle',
+    part: 'a',
+    answer: wholeLawn,
+    message: (g) => ({
+      en: en`The whole lot is still in your area. Take off what is not grass: ${obstructed(g)} in all.`,
+      es: es`Todo el terreno sigue incluido en su área. Reste lo que no es pasto: ${obstructed(g)} en total.`,
+    }),
+  },
+  {
+    key: 'forgot-one',
+    part: 'a',
+    answer: (g) => {
+      const left = last(g);
+      return left && g.obstacles.length > 1 ? add(treatedArea(g), obstacleArea(left)) : null;
+    },
+    message: (g) => {
+      const left = last(g);
+      const name = left ? obstacleName(left) : names(g);
+      const area = left ? obstacleArea(left) : obstructed(g);
+      return {
+        en: en`You forgot ${name}. It covers ${area}, and that comes off too.`,
+        es: es`Le faltó restar ${name}. Cubre ${area}, y eso también se resta.`,
+      };
+    },
+  },
+  {
+    key: 'added-obstacle',
+    part: 'a',
+    answer: (g) => add(wholeLawn(g), obstructed(g)),
+    message: (g) => ({
+      en: en`You added ${names(g)}. That ground is not treated, so its ${obstructed(g)} come off.`,
+      es: es`Usted sumó ${names(g)}. Ese suelo no se trata, así que se restan ${obstructed(g)}.`,
+    }),
+  },
+  {
+    key: 'subtracted-perimeter',
+    part: 'a',
+    answer: (g) => subtract(wholeLawn(g), quantity(aroundAll(g).value, 'sq-ft')),
+    message: (g) => ({
+      en: en`You took off the distance around ${names(g)}. Take off the area instead: length times width.`,
+      es: es`Usted restó el contorno de lo que no se trata. Reste su área: largo por ancho.`,
+    }),
+  },
+  {
+    key: 'only-obstacles',
+    part: 'a',
+    answer: obstructed,
+    message: (g) => ({
+      en: en`That is the ground you do not treat. Take ${obstructed(g)} off the whole lot.`,
+      es: es`Ese es el suelo que no se trata. Reste ${obstructed(g)} de todo el terreno.`,
+    }),
+  },
+  {
+    key: 'perimeter',
+    part: 'a',
+    answer: (g) => quantity(add(g.length, g.width).value.mul(2), 'sq-ft'),
+    message: (g) => ({
+      en: en`That is the distance around the lot. Area is length times width: ${g.length} × ${g.width} for the whole lot.`,
+      es: es`Esa es la distancia alrededor del terreno. El área es largo por ancho: ${g.length} × ${g.width} para todo el terreno.`,
+    }),
+  },
+];
+function aroundAll(g: Given): Quantity {
+  return g.obstacles.map(around).reduce((sum, one) => add(sum, one));
+}
+
+export const areaRectangleLessFamily = defineFamily<Given>({
+  key: 'area-rectangle-less',
+  version: 1,
+  topic: 'area',
+  tiers: [1, 2, 3],
+  title: { en: 'Lawn less obstacles', es: 'Césped menos obstáculos' },
+  sources: [
+    {
+      title: 'How Big is Your Lawn? (Purdue Turf Tips)',
+      publisher: 'Purdue University Turf Program',
+      year: 2014,
+      ref: 'Figures 1-2',
+    },
+  ],
+  draw,
+  heading: (g) => situationOf(situations, g).heading,
+  statement: (g) => situationOf(situations, g).statement(g),
+  parts: (g) => [
+    {
+      kind: 'number',
+      key: 'a',
+      topic: 'area',
+      ask: {
+        en: 'What area is treated, in square feet (sq ft), to the nearest whole square foot?',
+        es: '¿Qué área se trata, en pies cuadrados (pies²), redondeada al pie cuadrado entero?',
+      },
+      answer: treatedArea(g),
+      step: oneSqFt,
+      units: areaUnits,
+    },
+  ],
+  figure: lawnFigure,
+  hints: (g) => [
+    {
+      en: en`You are asked for the grass only. The plan gives the sides of the lot and of ${names(g)}.`,
+      es: es`Se pide solo el pasto. El plano da los lados del terreno y de cada cosa que no se trata.`,
+    },
+    {
+      en: 'Area treated = whole lot − everything that is not treated. Each area = length × width.',
+      es: 'Área tratada = todo el terreno − todo lo que no se trata. Cada área = largo × ancho.',
+    },
+    {
+      en: en`Whole lot = ${g.length} × ${g.width} = ${wholeLawn(g)}.`,
+      es: es`Todo el terreno = ${g.length} × ${g.width} = ${wholeLawn(g)}.`,
+    },
+  ],
+  working: lawnWorking,
+  slips,
+});
