@@ -8,7 +8,7 @@ import { rateLabelBaseFamily } from './families/rate/rate-label-base.ts';
 
 // One line a family: import it here and add it to the list. Old versions stay listed below the current ones.
 
-const current: readonly Family<never>[] = [
+const current: readonly Family<unknown>[] = [
   areaRectangleFamily,
   areaRectangleLessFamily,
   areaLShapeFamily,
@@ -16,16 +16,16 @@ const current: readonly Family<never>[] = [
   areaCircleFamily,
   rateLabelBaseFamily,
 ];
-const old: readonly Family<never>[] = [];
+const old: readonly Family<unknown>[] = [];
 
 const byKey = new Map<string, Family<unknown>>();
 const byVersion = new Map<string, Family<unknown>>();
-for (const family of current as unknown as readonly Family<unknown>[]) {
+for (const family of current) {
   if (byKey.has(family.key)) throw new Error(`two families are called ${family.key}`);
   byKey.set(family.key, family);
   byVersion.set(`${family.key}@${family.version}`, family);
 }
-for (const family of old as unknown as readonly Family<unknown>[])
+for (const family of old)
   byVersion.set(`${family.key}@${family.version}`, family);
 
 /** All current families, in the order of the registry. */

@@ -8,7 +8,7 @@ export type Expression =
   | { readonly is: 'quantity'; readonly value: Quantity; readonly cancel: boolean; readonly maxPlaces: number }
   | { readonly is: 'number'; readonly value: Rational; readonly maxPlaces: number }
   | { readonly is: 'words'; readonly text: Text }
-  | { readonly is: 'joined'; readonly sign: '×' | '+' | '−' | '÷' | '='; readonly items: readonly Expression[] }
+  | { readonly is: 'joined'; readonly sign: '×' | '+' | '−' | '÷' | '=' | '≈'; readonly items: readonly Expression[] }
   | { readonly is: 'over'; readonly top: Expression; readonly bottom: Expression }
   | { readonly is: 'grouped'; readonly item: Expression }
   | { readonly is: 'root'; readonly item: Expression }
@@ -60,6 +60,10 @@ export function dividedBy(...items: Expression[]): Expression {
 export function equals(...items: Expression[]): Expression {
   return { is: 'joined', sign: '=', items };
 }
+/** Equal after rounding: 100.48 sq ft ≈ 100 sq ft. */
+export function about(exact: Expression, rounded: Expression): Expression {
+  return { is: 'joined', sign: '≈', items: [exact, rounded] };
+}
 export function over(top: Expression, bottom: Expression): Expression {
   return { is: 'over', top, bottom };
 }
@@ -73,7 +77,7 @@ export function squared(item: Expression): Expression {
   return { is: 'squared', item };
 }
 
-const texSigns = { '×': ' \\times ', '+': ' + ', '−': ' - ', '÷': ' \\div ', '=': ' = ' } as const;
+const texSigns = { '×': ' \\times ', '+': ' + ', '−': ' - ', '÷': ' \\div ', '=': ' = ', '≈': ' \\approx ' } as const;
 
 function texText(text: string): string {
   return `\\text{${text.replace(/[\\{}$&#^_~%]/g, (sign) => (sign === '\\' ? '\\textbackslash ' : `\\${sign}`))}}`;
