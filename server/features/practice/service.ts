@@ -33,6 +33,8 @@ export interface PracticeDeps {
   /** IANA zone in which days are counted. */
   zone: string;
   now: () => Date;
+  /** Makes time-ordered identifiers; the demonstration's history makes them for its own times. */
+  newId?: () => string;
 }
 
 /** The rows one press of Check adds to the log. */
@@ -78,9 +80,10 @@ function rowOf(addition: Addition, standing: Standing): LoggedAnswer {
   };
 }
 
-function answerWrite(row: LoggedAnswer, addition: Addition, hints: number): AnswerWrite {
+function answerWrite(options: { id: string; row: LoggedAnswer; addition: Addition; hints: number }): AnswerWrite {
+  const { id, row, addition, hints } = options;
   return {
-    id: uuidv7(),
+    id,
     part: row.part,
     topic: addition.part.topic,
     response: row.response,
@@ -97,7 +100,7 @@ function answerWrite(row: LoggedAnswer, addition: Addition, hints: number): Answ
   };
 }
 
-export function practiceService({ repo, zone, now }: PracticeDeps) {
+export function practiceService({ repo, zone, now, newId = () => uuidv7() }: PracticeDeps) {
   const problems = problemCache();
 
   async function open(worker: Worker, problemId: string): Promise<{ loaded: Loaded; problem: Problem; standing: Standing }> {
@@ -135,7 +138,7 @@ export function practiceService({ repo, zone, now }: PracticeDeps) {
     };
     for (const addition of additions) {
       const row = rowOf(addition, standing);
-      write.answers.push(answerWrite(row, addition, hints));
+      write.answers.push(answerWrite({ id: newId(), row, addition, hints }));
       write.day.seconds += addition.seconds;
       if (row.isFirst) {
         const right = earnsMark(row.verdict);
@@ -185,11 +188,11 @@ export function practiceService({ repo, zone, now }: PracticeDeps) {
   async function create(worker: Worker, choice: { family: string; tier: Tier }, place: NewPlace): Promise<string> {
     const family = familyByKey(choice.family);
     if (!family || !family.tiers.includes(choice.tier)) throw new AppError('not-found');
-    const id = uuidv7();
+    const id = newId();
     const { version } = family;
     const seed = randomSeed();
     problems.get({ family: family.key, version, seed, tier: choice.tier });
-    await repo.create({ userId: worker.id, id, family: family.key, version, seed, tier: choice.tier, ...place });
+    await repo.create({ userId: worker.id, id, family: family.key, version, seed, tier: choice.tier, shownAt: now(), ...place });
     return id;
   }
 
@@ -251,7 +254,7 @@ export function practiceService({ repo, zone, now }: PracticeDeps) {
             part,
             graded: { verdict: 'blank', slip: null, read: { en: '', es: '' }, value: null, message: blankMessage },
             response: null,
-            key: uuidv7(),
+            key: newId(),
             seconds: 0,
           })),
       );

@@ -1,8 +1,9 @@
 import type { LevelView, ProgressView, SlipView } from '../../../shared/contracts/practice.ts';
-import { topics, type Locale } from '../../../shared/vocabulary.ts';
+import { topics, type Locale, type Topic } from '../../../shared/vocabulary.ts';
 import { familyByKey } from '../../problems/registry.ts';
 import { slipName } from '../../problems/slip-name.ts';
 import { levelView } from './level-view.ts';
+import type { PersonLevels } from '../practice/levels.ts';
 import type { ProgressRepo } from './repo.ts';
 
 export function progressService(repo: ProgressRepo, now: () => Date) {
@@ -14,6 +15,10 @@ export function progressService(repo: ProgressRepo, now: () => Date) {
 
   return {
     levels,
+    /** One topic's level straight from what an answer left behind. */
+    levelAfter: (after: PersonLevels, topic: Topic): LevelView =>
+      levelView({ topic, ability: after.ability, stored: after.topics.get(topic), at: now() }),
+
     async progress(userId: string, locale: Locale): Promise<ProgressView> {
       const [levelList, slips, days, totals] = await Promise.all([
         levels(userId),
