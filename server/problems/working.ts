@@ -5,7 +5,13 @@ import type { Locale, Text } from '../../shared/vocabulary.ts';
 
 /** An expression of a worked solution. Written once, rendered as KaTeX source, as plain text, in either language. */
 export type Expression =
-  | { readonly is: 'quantity'; readonly value: Quantity; readonly cancel: boolean; readonly maxPlaces: number }
+  | {
+      readonly is: 'quantity';
+      readonly value: Quantity;
+      readonly cancel: boolean;
+      readonly maxPlaces: number;
+      readonly places?: number;
+    }
   | { readonly is: 'number'; readonly value: Rational; readonly maxPlaces: number }
   | { readonly is: 'words'; readonly text: Text }
   | { readonly is: 'joined'; readonly sign: '×' | '+' | '−' | '÷' | '=' | '≈'; readonly items: readonly Expression[] }
@@ -28,9 +34,13 @@ export interface WorkingLine {
   readonly reason: Text;
 }
 
-/** A quantity with its unit; `cancel` strikes the unit through. `maxPlaces` bounds the decimals shown (default 4). */
-export function given(value: Quantity, options: { cancel?: boolean; maxPlaces?: number } = {}): Expression {
-  return { is: 'quantity', value, cancel: options.cancel ?? false, maxPlaces: options.maxPlaces ?? 4 };
+/** A quantity with its unit; `cancel` strikes the unit through. `maxPlaces` bounds the decimals shown (default 4); `places` fixes them. */
+export function given(
+  value: Quantity,
+  options: { cancel?: boolean; maxPlaces?: number; places?: number } = {},
+): Expression {
+  const base = { is: 'quantity', value, cancel: options.cancel ?? false, maxPlaces: options.maxPlaces ?? 4 } as const;
+  return options.places === undefined ? base : { ...base, places: options.places };
 }
 /** The same as `given`, with the unit struck through. */
 export function struck(value: Quantity, maxPlaces = 4): Expression {
@@ -85,9 +95,11 @@ function texText(text: string): string {
 function texNumber(text: string): string {
   return text.replaceAll(',', '{,}').replaceAll('−', '-').replaceAll('$', '\\$').replaceAll('%', '\\%');
 }
-function texQuantity(value: Quantity, cancel: boolean, maxPlaces: number, locale: Locale): string {
-  if (value.unit === 'usd' || value.unit === 'percent') return texNumber(formatQuantity(value, { maxPlaces, locale }));
-  const digits = texNumber(formatNumber(value.value, { maxPlaces, locale }));
+function texQuantity(item: Extract<Expression, { is: 'quantity' }>, locale: Locale): string {
+  const { value, cancel, maxPlaces, places } = item;
+  if (value.unit === 'usd' || value.unit === 'percent')
+    return texNumber(formatQuantity(value, { maxPlaces, places, locale }));
+  const digits = texNumber(formatNumber(value.value, { maxPlaces, places, locale }));
   const symbol = unitSymbol(value.unit, { locale, value: value.value });
   if (symbol === '') return digits;
   const unit = texText(symbol);
@@ -98,7 +110,7 @@ function texQuantity(value: Quantity, cancel: boolean, maxPlaces: number, locale
 export function toTex(item: Expression, locale: Locale): string {
   switch (item.is) {
     case 'quantity':
-      return texQuantity(item.value, item.cancel, item.maxPlaces, locale);
+      return texQuantity(item, locale);
     case 'number':
       return texNumber(formatNumber(item.value, { maxPlaces: item.maxPlaces, locale }));
     case 'words':
@@ -125,7 +137,7 @@ function plainOperand(item: Expression, locale: Locale): string {
 export function toPlain(item: Expression, locale: Locale): string {
   switch (item.is) {
     case 'quantity':
-      return formatQuantity(item.value, { maxPlaces: item.maxPlaces, locale });
+      return formatQuantity(item.value, { maxPlaces: item.maxPlaces, places: item.places, locale });
     case 'number':
       return formatNumber(item.value, { maxPlaces: item.maxPlaces, locale });
     case 'words':

@@ -1,5 +1,5 @@
 import type { LabelView } from '../../../shared/contracts/label.ts';
-import { formatNumber, formatQuantity } from '../../../shared/quantity/format.ts';
+import { formatNumber, formatQuantity, unitWord } from '../../../shared/quantity/format.ts';
 import type { Quantity } from '../../../shared/quantity/quantity.ts';
 import type { Locale, Text } from '../../../shared/vocabulary.ts';
 import { oneFigure } from './pick.ts';
@@ -32,16 +32,21 @@ function measured(value: Quantity, locale: Locale): string {
   return formatQuantity(value, { locale });
 }
 
+/** What an amount is for, after "each": "acre", "gallon", "1,000 sq ft". */
+function one(base: Quantity, locale: Locale): string {
+  return base.value.compare(1) === 0 ? unitWord(base.unit, { locale, value: base.value }) : measured(base, locale);
+}
+
 /** "1.5 fl oz", or "1.5 to 2.5 fl oz" for a range. */
 function spanText(span: Span, locale: Locale): string {
-  const one = oneFigure(span);
-  if (one) return measured(one, locale);
+  const figure = oneFigure(span);
+  if (figure) return measured(figure, locale);
   return `${formatNumber(span.least.value, { locale })} ${locale === 'es' ? 'a' : 'to'} ${measured(span.most, locale)}`;
 }
 
 function areaText(rate: Extract<LabelRate, { basis: 'area' }>, locale: Locale): string {
   const product = spanText(rate.product, locale);
-  const area = measured(rate.area, locale);
+  const area = one(rate.area, locale);
   if (!rate.water) return locale === 'es' ? `${product} por cada ${area}` : `${product} for each ${area}`;
   const water = spanText(rate.water, locale);
   return locale === 'es'
@@ -55,7 +60,7 @@ export function rateText(rate: LabelRate, locale: Locale): string {
     case 'area':
       return areaText(rate, locale);
     case 'mix': {
-      const [product, mix] = [spanText(rate.product, locale), measured(rate.mix, locale)];
+      const [product, mix] = [spanText(rate.product, locale), one(rate.mix, locale)];
       return locale === 'es'
         ? `${product} por cada ${mix} de mezcla terminada`
         : `${product} in each ${mix} of finished spray`;

@@ -9,7 +9,7 @@ import { en, es } from '../../say.ts';
 import { drawScene, situationOf } from '../../situations.ts';
 import { dividedBy, given, number, times, type WorkingLine } from '../../working.ts';
 import { circleSituations, measureName, type CircleGiven } from './area-circle-situations.ts';
-import { across, areaUnits, drawn, edge, oneSqFt, sqFt } from './plan-parts.ts';
+import { across, areaUnits, drawn, edge, oneSqFt, sqFt, toWholeSqFt } from './plan-parts.ts';
 
 type Given = CircleGiven;
 
@@ -97,17 +97,16 @@ function working(g: Given): readonly WorkingLine[] {
       es: 'El radio es la mitad de la distancia de lado a lado.',
     },
   };
+  const squaring = times(number('3.14'), given(g.radius), given(g.radius));
   const whole: WorkingLine = {
     name: g.half ? { en: 'whole circle', es: 'círculo entero' } : { en: 'area', es: 'área' },
-    expression: times(number('3.14'), given(g.radius), given(g.radius)),
-    result: given(circleArea(g)),
+    ...(g.half ? { expression: squaring, result: given(circleArea(g)) } : toWholeSqFt(squaring, circleArea(g))),
     answers: !g.half,
     reason: { en: 'Pi times the radius times the radius.', es: 'Pi por el radio por el radio.' },
   };
   const half: WorkingLine = {
     name: { en: 'area', es: 'área' },
-    expression: dividedBy(given(circleArea(g)), number(2)),
-    result: given(answer(g)),
+    ...toWholeSqFt(dividedBy(given(circleArea(g)), number(2)), answer(g)),
     answers: true,
     reason: { en: 'The bed is half of the circle.', es: 'El arriate es la mitad del círculo.' },
   };

@@ -3,7 +3,7 @@ import { add, quantity, subtract, type Quantity } from '../../../../shared/quant
 import type { Tier } from '../../../../shared/vocabulary.ts';
 import { defineFamily, type Slip } from '../../family.ts';
 import type { Rng } from '../../rng.ts';
-import { en, es, inWords } from '../../say.ts';
+import { en, es } from '../../say.ts';
 import { drawScene, situationOf, type Situation } from '../../situations.ts';
 import { given, minus, plus, times, type WorkingLine } from '../../working.ts';
 import { around, lShapeFigure, markedSides, narrowDepth, narrowLength, type LShapeGiven } from './area-l-shape-plan.ts';
@@ -15,8 +15,8 @@ const situations: readonly Situation<Given>[] = [
   {
     heading: { en: 'A lawn around a corner', es: 'Un césped en esquina' },
     statement: (g) => ({
-      en: en`${g.person} treats a lawn ${g.place.at} that is shaped like ${an(g)}. The plan shows the sides in feet (ft). The longest side is ${inWords(g.length)}.`,
-      es: es`${g.person} trata un césped ${g.place.at} en forma de ${g.shape}. El plano muestra los lados en pies. El lado más largo mide ${inWords(g.length)}.`,
+      en: en`${g.person} treats a lawn ${g.place.at} that is shaped like ${an(g)}. The sides on the plan are in feet (ft).`,
+      es: es`${g.person} trata un césped en forma de ${g.shape} ${g.place.at}. Los lados del plano están en pies.`,
     }),
   },
   {
@@ -29,8 +29,8 @@ const situations: readonly Situation<Given>[] = [
   {
     heading: { en: 'Two rectangles in one', es: 'Dos rectángulos en uno' },
     statement: (g) => ({
-      en: en`${g.person} has paced nothing: every side on this plan of ${an(g)}-shaped lawn was taped, in feet (ft). The whole lawn gets treated.`,
-      es: es`${g.person} no midió a pasos: cada lado de este plano de un césped en forma de ${g.shape} se midió con cinta, en pies. Se trata todo el césped.`,
+      en: en`${g.person} tapes ${an(g)}-shaped lawn ${g.place.at} and writes the sides on a plan, in feet (ft). The whole lawn gets treated.`,
+      es: es`${g.person} mide con cinta un césped en forma de ${g.shape} ${g.place.at} y anota los lados en un plano, en pies. Se trata todo el césped.`,
     }),
   },
   {

@@ -4,15 +4,17 @@ import type { Text, Tier } from '../../../../shared/vocabulary.ts';
 import { defineFamily, type Slip } from '../../family.ts';
 import type { Rng } from '../../rng.ts';
 import { en, es, firstUse } from '../../say.ts';
-import { drawScene, situationOf, type Scene, type Situation } from '../../situations.ts';
+import { capital, drawScene, situationOf, type Scene, type Situation } from '../../situations.ts';
 import {
   lawnFigure,
   lawnWorking,
   listed,
+  noneOf,
   obstacleArea,
   obstacleName,
   obstacleSides,
   placeObstacles,
+  siteName,
   sumOf,
   treatedArea,
   wholeLawn,
@@ -26,8 +28,8 @@ interface Given extends Scene, LawnWithObstacles {}
 /** "The lawn is 62 feet (ft) by 35 ft; the patio is 20 ft by 10 ft." */
 function measures(g: Given): Text {
   return {
-    en: en`The lot is ${firstUse(g.length)} by ${g.width}; ${obstacleSides(g)}.`,
-    es: es`El terreno mide ${firstUse(g.length)} por ${g.width}; ${obstacleSides(g)}.`,
+    en: en`${capital(siteName(g).the)} is ${firstUse(g.length)} by ${g.width}; ${obstacleSides(g)}.`,
+    es: es`${capital(siteName(g).the)} mide ${firstUse(g.length)} por ${g.width}; ${obstacleSides(g)}.`,
   };
 }
 const names = (g: Given) => listed(g.obstacles.map(obstacleName));
@@ -36,8 +38,8 @@ const situations: readonly Situation<Given>[] = [
   {
     heading: { en: 'A lawn, less what stands on it', es: 'Un césped, menos lo que hay encima' },
     statement: (g) => ({
-      en: en`${g.person} sprays all the grass on a lot, but not ${names(g)}. ${measures(g)}`,
-      es: es`${g.person} rocía todo el pasto de un terreno, pero no ${names(g)}. ${measures(g)}`,
+      en: en`${g.person} sprays all the grass on one property, but not ${noneOf(g.obstacles.map(obstacleName))}. ${measures(g)}`,
+      es: es`${g.person} rocía todo el pasto de una propiedad, pero no ${noneOf(g.obstacles.map(obstacleName))}. ${measures(g)}`,
     }),
   },
   {
@@ -50,14 +52,14 @@ const situations: readonly Situation<Given>[] = [
   {
     heading: { en: 'A work order without an area', es: 'Una orden de trabajo sin área' },
     statement: (g) => ({
-      en: en`A work order says "all turf." ${g.person} measures the lot. ${measures(g)} The rest is turf.`,
-      es: es`Una orden de trabajo dice «todo el césped». ${g.person} mide el terreno. ${measures(g)} El resto es césped.`,
+      en: en`A work order says "all turf." ${g.person} gets out the tape. ${measures(g)} The rest is turf.`,
+      es: es`Una orden de trabajo dice «todo el césped». ${g.person} saca la cinta. ${measures(g)} El resto es césped.`,
     }),
   },
   {
     heading: { en: 'Only the grass', es: 'Solo el pasto' },
     statement: (g) => ({
-      en: en`Granules must not land on ${names(g)}, so ${g.person} counts only the grass. ${measures(g)}`,
+      en: en`Granules must not land on ${noneOf(g.obstacles.map(obstacleName))}, so ${g.person} counts only the grass. ${measures(g)}`,
       es: es`Los gránulos no deben caer fuera del pasto, así que ${g.person} cuenta solo el pasto. ${measures(g)}`,
     }),
   },
@@ -105,8 +107,8 @@ const slips: readonly Slip<Given>[] = [
     part: 'a',
     answer: wholeLawn,
     message: (g) => ({
-      en: en`The whole lot is still in your area. Take off what is not grass: ${obstructed(g)} in all.`,
-      es: es`Todo el terreno sigue incluido en su área. Reste lo que no es pasto: ${obstructed(g)} en total.`,
+      en: en`The ${siteName(g).whole} is still in your area. Take off what is not grass: ${obstructed(g)} in all.`,
+      es: es`Todavía está ${siteName(g).whole} en su área. Reste lo que no es pasto: ${obstructed(g)} en total.`,
     }),
   },
   {
@@ -149,8 +151,8 @@ const slips: readonly Slip<Given>[] = [
     part: 'a',
     answer: obstructed,
     message: (g) => ({
-      en: en`That is the ground you do not treat. Take ${obstructed(g)} off the whole lot.`,
-      es: es`Ese es el suelo que no se trata. Reste ${obstructed(g)} de todo el terreno.`,
+      en: en`That is the ground you do not treat. Take ${obstructed(g)} off the ${siteName(g).whole}.`,
+      es: es`Ese es el suelo que no se trata. Reste ${obstructed(g)} de ${siteName(g).whole}.`,
     }),
   },
   {
@@ -158,8 +160,8 @@ const slips: readonly Slip<Given>[] = [
     part: 'a',
     answer: (g) => quantity(add(g.length, g.width).value.mul(2), 'sq-ft'),
     message: (g) => ({
-      en: en`That is the distance around the lot. Area is length times width: ${g.length} × ${g.width} for the whole lot.`,
-      es: es`Esa es la distancia alrededor del terreno. El área es largo por ancho: ${g.length} × ${g.width} para todo el terreno.`,
+      en: en`That is the distance around the outside. Area is length times width: ${g.length} × ${g.width} for the ${siteName(g).whole}.`,
+      es: es`Esa es la distancia alrededor. El área es largo por ancho: ${g.length} × ${g.width} para ${siteName(g).whole}.`,
     }),
   },
 ];
@@ -201,16 +203,16 @@ export const areaRectangleLessFamily = defineFamily<Given>({
   figure: lawnFigure,
   hints: (g) => [
     {
-      en: en`You are asked for the grass only. The plan gives the sides of the lot and of ${names(g)}.`,
-      es: es`Se pide solo el pasto. El plano da los lados del terreno y de cada cosa que no se trata.`,
+      en: en`You are asked for the grass only. The plan gives the sides of ${siteName(g).the} and of ${names(g)}.`,
+      es: es`Se pide solo el pasto. El plano da los lados de todo el sitio y de cada cosa que no se trata.`,
     },
     {
-      en: 'Area treated = whole lot − everything that is not treated. Each area = length × width.',
-      es: 'Área tratada = todo el terreno − todo lo que no se trata. Cada área = largo × ancho.',
+      en: 'Area treated = whole site − everything that is not treated. Each area = length × width.',
+      es: 'Área tratada = todo el sitio − todo lo que no se trata. Cada área = largo × ancho.',
     },
     {
-      en: en`Whole lot = ${g.length} × ${g.width} = ${wholeLawn(g)}.`,
-      es: es`Todo el terreno = ${g.length} × ${g.width} = ${wholeLawn(g)}.`,
+      en: en`The ${siteName(g).whole} = ${g.length} × ${g.width} = ${wholeLawn(g)}.`,
+      es: es`${capital(siteName(g).whole)} = ${g.length} × ${g.width} = ${wholeLawn(g)}.`,
     },
   ],
   working: lawnWorking,

@@ -9,7 +9,7 @@ import { en, es } from '../../say.ts';
 import { drawScene, situationOf } from '../../situations.ts';
 import { given, over, struck, times, type WorkingLine } from '../../working.ts';
 import { rectangleSituations, type RectangleGiven } from './area-rectangle-situations.ts';
-import { areaUnits, boxDimensions, drawn, oneSqFt, sqFt } from './plan-parts.ts';
+import { areaUnits, boxDimensions, drawn, oneSqFt, sqFt, toWholeSqFt } from './plan-parts.ts';
 
 type Given = RectangleGiven;
 
@@ -120,8 +120,7 @@ function working(g: Given): readonly WorkingLine[] {
     ...toFeetLine(g),
     {
       name: { en: 'area', es: 'área' },
-      expression: times(given(inFeet(g.length)), given(inFeet(g.width))),
-      result: given(rectangleArea(g)),
+      ...toWholeSqFt(times(given(inFeet(g.length)), given(inFeet(g.width))), rectangleArea(g)),
       answers: true,
       reason: {
         en: 'Length times width; feet times feet gives square feet.',

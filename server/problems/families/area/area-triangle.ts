@@ -8,7 +8,7 @@ import type { Rng } from '../../rng.ts';
 import { en, es } from '../../say.ts';
 import { drawScene, situationOf, type Scene, type Situation } from '../../situations.ts';
 import { dividedBy, given, number, times, type WorkingLine } from '../../working.ts';
-import { across, areaUnits, drawn, edge, oneSqFt, sqFt } from './plan-parts.ts';
+import { across, areaUnits, drawn, edge, oneSqFt, sqFt, toWholeSqFt } from './plan-parts.ts';
 
 interface Given extends Scene {
   /** A square corner; the height inside; the height outside, beyond one end of the base. */
@@ -56,8 +56,8 @@ const situations: readonly Situation<Given>[] = [
   {
     heading: { en: 'A slope beside the road', es: 'Un talud junto al camino' },
     statement: (g) => ({
-      en: en`The strip beside the road ${g.place.at} ends in a triangle of grass. In feet (ft) it has ${sides(g)}.${corner(g)}`,
-      es: es`La franja junto al camino ${g.place.at} termina en un triángulo de pasto. En pies (ft) tiene ${sides(g)}.${corner(g)}`,
+      en: en`The strip beside the road ${g.place.at} ends in a triangle of grass. Taped in feet (ft): ${sides(g)}.${corner(g)}`,
+      es: es`La franja junto al camino ${g.place.at} termina en un triángulo de pasto. Medido en pies: ${sides(g)}.${corner(g)}`,
     }),
   },
 ];
@@ -104,7 +104,7 @@ function draw(rng: Rng, tier: Tier): Given | null {
   const [near, far] = one.reachFt < two.reachFt ? [one, two] : [two, one];
   const outside = tier === 3;
   const baseFt = outside ? far.reachFt - near.reachFt : far.reachFt + near.reachFt;
-  if (baseFt < 12 || baseFt > 110) return null;
+  if (baseFt < 18 || baseFt > 110) return null;
   return {
     ...scene,
     form: outside ? 'outside' : 'inside',
@@ -178,8 +178,7 @@ function working(g: Given): readonly WorkingLine[] {
     },
     {
       name: { en: 'area', es: 'área' },
-      expression: dividedBy(given(rectangle), number(2)),
-      result: given(answer(g)),
+      ...toWholeSqFt(dividedBy(given(rectangle), number(2)), answer(g)),
       answers: true,
       reason: { en: 'A triangle is half of that rectangle.', es: 'Un triángulo es la mitad de ese rectángulo.' },
     },

@@ -109,6 +109,22 @@ export interface LawnWithObstacles {
   readonly obstacles: readonly Obstacle[];
 }
 
+/** What the outer rectangle is called: a lot when a house stands on it, else a lawn. */
+export function siteName(lawn: LawnWithObstacles): { readonly the: Text; readonly whole: Text; readonly bare: Text } {
+  const lot = lawn.obstacles.some((one) => one.kind === 'house' || one.kind === 'driveway');
+  return lot
+    ? {
+        the: { en: 'the lot', es: 'el terreno' },
+        whole: { en: 'whole lot', es: 'todo el terreno' },
+        bare: { en: 'lot', es: 'terreno' },
+      }
+    : {
+        the: { en: 'the lawn', es: 'el césped' },
+        whole: { en: 'whole lawn', es: 'todo el césped' },
+        bare: { en: 'lawn', es: 'césped' },
+      };
+}
+
 export function obstacleName(obstacle: Obstacle): Text {
   return obstacleKinds[obstacle.kind].the;
 }
@@ -161,19 +177,24 @@ export function placeObstacles(
 }
 
 /** Names joined as in a sentence: "the house, the driveway and the patio". */
-export function listed(names: readonly Text[]): Text {
-  const join = (all: readonly string[], and: string) =>
-    all.length < 2 ? all.join('') : `${all.slice(0, -1).join(', ')} ${and} ${all.at(-1)}`;
+export function listed(names: readonly Text[], joined: Text = { en: 'and', es: 'y' }): Text {
+  const join = (all: readonly string[], last: string) =>
+    all.length < 2 ? all.join('') : `${all.slice(0, -1).join(', ')} ${last} ${all.at(-1) ?? ''}`;
   return {
     en: join(
       names.map((one) => one.en),
-      'and',
+      joined.en,
     ),
     es: join(
       names.map((one) => one.es),
-      'y',
+      joined.es,
     ),
   };
+}
+
+/** Names joined after "not": "the house, the driveway or the patio". */
+export function noneOf(names: readonly Text[]): Text {
+  return listed(names, { en: 'or', es: 'ni' });
 }
 
 /** "the patio is 20 ft by 10 ft" for each obstacle, joined. */
@@ -214,11 +235,11 @@ export function lawnFigure(lawn: LawnWithObstacles): PlanFigure<Text> {
     kind: 'plan',
     width: outer.width,
     height: outer.height,
-    shapes: [{ form: 'rect', ...outer, ground: 'turf', name: { en: 'lawn', es: 'césped' } }, ...inner],
+    shapes: [{ form: 'rect', ...outer, ground: 'turf', name: { en: 'grass', es: 'pasto' } }, ...inner],
     dimensions: [...boxDimensions(outer, sides(lawn)), ...obstacleDimensions],
     alt: {
-      en: en`Plan to scale of a rectangular lawn, ${lawn.length} long and ${lawn.width} wide.${several ? { en: en` Inside it ${obstacleSides(lawn)}.`, es: '' } : ''}`,
-      es: es`Plano a escala de un césped rectangular de ${lawn.length} de largo y ${lawn.width} de ancho.${several ? { en: '', es: es` Dentro, ${obstacleSides(lawn)}.` } : ''}`,
+      en: en`Plan to scale of a rectangular ${siteName(lawn).bare}, ${lawn.length} long and ${lawn.width} wide.${several ? { en: en` Inside it ${obstacleSides(lawn)}.`, es: '' } : ''}`,
+      es: es`Plano a escala de un ${siteName(lawn).bare} rectangular de ${lawn.length} de largo y ${lawn.width} de ancho.${several ? { en: '', es: es` Dentro, ${obstacleSides(lawn)}.` } : ''}`,
     },
   };
 }
@@ -227,7 +248,7 @@ export function lawnFigure(lawn: LawnWithObstacles): PlanFigure<Text> {
 export function lawnWorking(lawn: LawnWithObstacles): readonly WorkingLine[] {
   const whole = wholeLawn(lawn);
   const all = {
-    name: { en: 'whole lawn', es: 'todo el césped' },
+    name: siteName(lawn).whole,
     expression: times(given(lawn.length), given(lawn.width)),
     result: given(whole),
     reason: { en: 'Length times width.', es: 'Largo por ancho.' },

@@ -3,6 +3,7 @@ import { quantity, type Quantity } from '../../../../shared/quantity/quantity.ts
 import { rational, type Rational } from '../../../../shared/quantity/rational.ts';
 import type { UnitKey } from '../../../../shared/quantity/units.ts';
 import type { Text } from '../../../../shared/vocabulary.ts';
+import { about, given, type Expression, type WorkingLine } from '../../working.ts';
 
 /** A rational as the nearest double, for drawing only; never goes back into a formula. */
 export function drawn(value: Rational | string | number): number {
@@ -45,4 +46,10 @@ export const areaUnits: readonly UnitKey[] = ['sq-ft', 'sq-yd', 'acre'];
 
 export function sqFt(value: Rational | number | string): Quantity {
   return quantity(value, 'sq-ft');
+}
+
+/** The last step of an area: the exact figure, then the whole square feet one writes down. */
+export function toWholeSqFt(expression: Expression, area: Quantity): Pick<WorkingLine, 'expression' | 'result'> {
+  if (area.value.d === 1n) return { expression, result: given(area) };
+  return { expression, result: about(given(area), given(area, { places: 0 })) };
 }

@@ -3,6 +3,7 @@ import { rational } from '../../../../shared/quantity/rational.ts';
 import { roundToStep } from '../../../../shared/quantity/round.ts';
 import type { Text } from '../../../../shared/vocabulary.ts';
 import { en, es } from '../../say.ts';
+import { about, given, type Expression } from '../../working.ts';
 
 const tenth = rational('0.1');
 
@@ -48,4 +49,10 @@ function weighedOut(shown: Quantity): Text {
     en: en`On a scale that is ${quantity(pounds, 'lb')} ${rest}.`,
     es: es`En una balanza son ${quantity(pounds, 'lb')} ${rest}.`,
   };
+}
+
+/** The last step of an amount asked to a tenth: the exact figure, then the rounded one where they differ. */
+export function toTenth(amount: Quantity): Expression {
+  const rounded = given(amount, { places: 1 });
+  return roundToStep(amount.value, tenth).compare(amount.value) === 0 ? rounded : about(given(amount), rounded);
 }

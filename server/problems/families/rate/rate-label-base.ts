@@ -1,4 +1,4 @@
-import { quantity, ratio } from '../../../../shared/quantity/quantity.ts';
+import { quantity, ratio, scale } from '../../../../shared/quantity/quantity.ts';
 import { rational } from '../../../../shared/quantity/rational.ts';
 import type { Text, Tier } from '../../../../shared/vocabulary.ts';
 import { defineFamily, type Earlier, type NumberPart } from '../../family.ts';
@@ -13,13 +13,14 @@ import {
   obstacleArea,
   obstacleSides,
   placeObstacles,
+  siteName,
   treatedArea,
   wholeLawn,
   type Obstacle,
 } from '../area/obstacles.ts';
 import { areaUnits, oneSqFt } from '../area/plan-parts.ts';
 import { drawnLine, labelUse, lineHeading } from './label-lines.ts';
-import { measuredOut } from './measure-out.ts';
+import { measuredOut, toTenth } from './measure-out.ts';
 import { labelBaseSlips, scaled } from './rate-label-base-slips.ts';
 import { labelBaseSituations, type LabelBaseGiven } from './rate-label-base-texts.ts';
 
@@ -39,7 +40,7 @@ const layouts: Record<Tier, readonly (readonly Obstacle['kind'][])[]> = {
   1: [[]],
   2: [['patio'], ['terrace'], ['shed'], ['playground'], ['bed'], ['pond']],
   3: [
-    ['house', 'driveway'],
+    ['playground', 'shed'],
     ['patio', 'bed'],
     ['terrace', 'shed'],
     ['playground', 'patio'],
@@ -128,22 +129,35 @@ function parts(g: Given, earlier: Earlier): readonly NumberPart[] {
   ];
 }
 
+/** The check at the end: between which amounts of water the answer must lie. */
+function sensible(g: Given): Text {
+  const share = ratio(treatedArea(g), g.line.labelArea);
+  const [least, most] = [share.floor(), share.ceil()];
+  if (least.compare(most) === 0) {
+    return {
+      en: en`Check: the area is exactly ${least} times the label's, so the water is ${least} times ${g.line.water}.`,
+      es: es`Compruebe: el área es exactamente ${least} veces la de la etiqueta, así que el agua es ${least} veces ${g.line.water}.`,
+    };
+  }
+  return {
+    en: en`Check: the area is between ${least} and ${most} times the label's, so the water must lie between ${scale(g.line.water, least)} and ${scale(g.line.water, most)}. It does.`,
+    es: es`Compruebe: el área está entre ${least} y ${most} veces la de la etiqueta, así que el agua debe estar entre ${scale(g.line.water, least)} y ${scale(g.line.water, most)}. Así es.`,
+  };
+}
+
 function working(g: Given): readonly WorkingLine[] {
   const area = treatedArea(g);
   const line = (name: Text, amount: Given['line']['product'], reason: Text): WorkingLine => ({
     name,
     expression: times(struck(area), over(given(amount), struck(g.line.labelArea))),
-    result: given(scaled(g, amount, {}), { maxPlaces: 1 }),
+    result: toTenth(scaled(g, amount, {})),
     answers: true,
     reason,
   });
   return [
     ...lawnWorking(g),
     line({ en: 'product', es: 'producto' }, g.line.product, measuredOut(scaled(g, g.line.product, {}))),
-    line({ en: 'water', es: 'agua' }, g.line.water, {
-      en: en`The water grows with the area just as the product does: about ${g.line.water} for each ${g.line.labelArea}.`,
-      es: es`El agua crece con el área igual que el producto: unos ${g.line.water} por cada ${g.line.labelArea}.`,
-    }),
+    line({ en: 'water', es: 'agua' }, g.line.water, sensible(g)),
   ];
 }
 
@@ -155,13 +169,13 @@ function hints(g: Given): readonly [Text, Text, Text] {
       es: es`Se piden tres cosas: el área que se rocía, el producto y el agua para esa área. La línea «${lineHeading(g.line)}» de la etiqueta da las dos cantidades para ${g.line.labelArea}.`,
     },
     {
-      en: en`${less ? 'Area sprayed = whole lawn − what is not sprayed.' : 'Area = length × width.'} Then: product = label product × (your area ÷ label area). Water works the same way.`,
-      es: es`${less ? 'Área rociada = todo el césped − lo que no se rocía.' : 'Área = largo × ancho.'} Después: producto = producto de la etiqueta × (su área ÷ área de la etiqueta). Con el agua es igual.`,
+      en: en`${less ? 'Area sprayed = whole site − what is not sprayed.' : 'Area = length × width.'} Then: product = label product × (your area ÷ label area). Water works the same way.`,
+      es: es`${less ? 'Área rociada = todo el sitio − lo que no se rocía.' : 'Área = largo × ancho.'} Después: producto = producto de la etiqueta × (su área ÷ área de la etiqueta). Con el agua es igual.`,
     },
     less
       ? {
-          en: en`${g.length} × ${g.width} is the whole lawn. Then ${obstacleSides(g)}.`,
-          es: es`${g.length} × ${g.width} es todo el césped. Luego, ${obstacleSides(g)}.`,
+          en: en`${g.length} × ${g.width} is the ${siteName(g).whole}. Then ${obstacleSides(g)}.`,
+          es: es`${g.length} × ${g.width} es ${siteName(g).whole}. Luego, ${obstacleSides(g)}.`,
         }
       : { en: en`Begin with ${g.length} × ${g.width}.`, es: es`Empiece con ${g.length} × ${g.width}.` },
   ];
