@@ -1,8 +1,7 @@
 import { z } from 'zod';
-import { locales, partKeys, tiers, topics, verdicts } from '../vocabulary.ts';
-import type { LevelState, Locale, PartKey, Tier, Topic, Verdict } from '../vocabulary.ts';
+import { levelStates, locales, partKeys, tiers, topics, verdicts } from '../vocabulary.ts';
 import type { Figure } from './figure.ts';
-import type { LabelView } from './label.ts';
+import { labelViewSchema } from './label.ts';
 
 /** What a trainee sends for one part. `text` is what was typed; the unit comes with it or from the field's unit list. */
 export const responseSchema = z.discriminatedUnion('kind', [
@@ -33,119 +32,148 @@ export const newDrillBodySchema = z.object({
 export type NewDrillBody = z.infer<typeof newDrillBodySchema>;
 
 /** One answer as it stands in the record, with what may be said of it. */
-export interface AttemptView {
-  typed: string;
+export const attemptViewSchema = z.object({
+  typed: z.string(),
   /** How the entry was read: "2 1/2 Tbsp"; the option's text; the order in words. */
-  read: string;
-  verdict: Verdict;
-  slip: string | null;
+  read: z.string(),
+  verdict: z.enum(verdicts),
+  slip: z.string().nullable(),
   /** "The patio is still in your area." */
-  headline: string;
+  headline: z.string(),
   /** The rest, with these numbers. */
-  detail: string;
+  detail: z.string(),
   /** First answers count for the level; later ones are practice. */
-  counts: boolean;
-}
+  counts: z.boolean(),
+});
+export type AttemptView = z.infer<typeof attemptViewSchema>;
 
-export interface PartViewBase {
-  key: PartKey;
-  topic: Topic;
-  ask: string;
-  state: 'open' | 'closed';
-  attempts: AttemptView[];
-  hints: string[];
-  hintsLeft: number;
+const partBase = {
+  key: z.enum(partKeys),
+  topic: z.enum(topics),
+  ask: z.string(),
+  state: z.enum(['open', 'closed']),
+  attempts: z.array(attemptViewSchema),
+  hints: z.array(z.string()),
+  hintsLeft: z.number(),
   /** Only once the part is closed: the answer as one would measure it. */
-  answerText: string | null;
-}
-export type PartView = PartViewBase &
-  (
-    | { kind: 'number'; units: { key: string; symbol: string }[]; rounding: string }
-    | { kind: 'count'; thing: string }
-    | { kind: 'choice'; options: { key: string; text: string; reason: string | null; right: boolean | null }[] }
-    | { kind: 'order'; steps: { key: string; text: string }[] }
-  );
+  answerText: z.string().nullable(),
+};
+const keyed = z.object({ key: z.string(), text: z.string() });
+
+export const partViewSchema = z.discriminatedUnion('kind', [
+  z.object({
+    ...partBase,
+    kind: z.literal('number'),
+    units: z.array(z.object({ key: z.string(), symbol: z.string() })),
+    rounding: z.string(),
+  }),
+  z.object({ ...partBase, kind: z.literal('count'), thing: z.string() }),
+  z.object({
+    ...partBase,
+    kind: z.literal('choice'),
+    /** `reason` and `right` only once the part is closed. */
+    options: z.array(keyed.extend({ reason: z.string().nullable(), right: z.boolean().nullable() })),
+  }),
+  z.object({ ...partBase, kind: z.literal('order'), steps: z.array(keyed) }),
+]);
+export type PartView = z.infer<typeof partViewSchema>;
 
 /** A line of a worked solution: KaTeX already rendered to HTML with MathML on the server. */
-export interface WorkingLineView {
-  html: string;
-  plain: string;
-  reason: string;
-  answers: boolean;
-}
+export const workingLineViewSchema = z.object({
+  html: z.string(),
+  plain: z.string(),
+  reason: z.string(),
+  answers: z.boolean(),
+});
+export type WorkingLineView = z.infer<typeof workingLineViewSchema>;
 
-export interface ProblemView {
-  id: string;
-  topic: Topic;
-  tier: Tier;
-  heading: string;
-  statement: string;
-  figure: Figure | null;
-  label: LabelView | null;
-  parts: PartView[];
+export const problemViewSchema = z.object({
+  id: z.string(),
+  topic: z.enum(topics),
+  tier: z.union([z.literal(1), z.literal(2), z.literal(3)]),
+  heading: z.string(),
+  statement: z.string(),
+  figure: z.custom<Figure>((value) => typeof value === 'object').nullable(),
+  label: labelViewSchema.nullable(),
+  parts: z.array(partViewSchema),
   /** Given once every part is closed. */
-  working: WorkingLineView[] | null;
-  state: 'open' | 'done';
+  working: z.array(workingLineViewSchema).nullable(),
+  state: z.enum(['open', 'done']),
   /** Where it belongs: the drill and its place in it, or nothing. */
-  drill: { id: string; position: number; length: number } | null;
-  locale: Locale;
-}
+  drill: z.object({ id: z.string(), position: z.number(), length: z.number() }).nullable(),
+  locale: z.enum(locales),
+});
+export type ProblemView = z.infer<typeof problemViewSchema>;
 
-export interface LevelView {
-  topic: Topic;
-  state: LevelState;
-  answers: number;
+const tierSchema = z.union([z.literal(1), z.literal(2), z.literal(3)]);
+
+export const levelViewSchema = z.object({
+  topic: z.enum(topics),
+  state: z.enum(levelStates),
+  answers: z.number(),
   /** Predicted share right on an average tier-2 problem of the topic, and its 80 % range; null while not started. */
-  fill: number | null;
-  range: { low: number; high: number } | null;
+  fill: z.number().nullable(),
+  range: z.object({ low: z.number(), high: z.number() }).nullable(),
   /** Tiers that problems of this topic come in; empty where none can be drilled yet. */
-  tiers: Tier[];
-}
+  tiers: z.array(tierSchema),
+});
+export type LevelView = z.infer<typeof levelViewSchema>;
 
-export interface AnswerReply {
+const unreadableSchema = z.object({ code: z.string(), message: z.string() }).nullable();
+
+export const answerReplySchema = z.object({
   /** The entry could not be read: the reason; nothing was recorded. */
-  unreadable: { code: string; message: string } | null;
-  problem: ProblemView;
+  unreadable: unreadableSchema,
+  problem: problemViewSchema,
   /** The level of the part's topic after this answer, when it counted. */
-  level: LevelView | null;
-}
+  level: levelViewSchema.nullable(),
+});
+export type AnswerReply = z.infer<typeof answerReplySchema>;
 
-export interface DrillView {
-  id: string;
-  topics: Topic[];
-  tier: Tier | 'rising';
-  length: number;
-  state: 'open' | 'done';
+export const drillViewSchema = z.object({
+  id: z.string(),
+  topics: z.array(z.enum(topics)),
+  tier: z.union([tierSchema, z.literal('rising')]),
+  length: z.number(),
+  state: z.enum(['open', 'done']),
   /** One entry a place: not reached, in front of the person, or done with its outcome. */
-  places: { position: number; problemId: string | null; outcome: 'waiting' | 'open' | 'right' | 'partly' | 'wrong' }[];
-  /** The problem to work now; null when the drill is done. */
-  currentProblemId: string | null;
-}
-
-export const localeSchema = z.enum(locales);
-export const verdictSchema = z.enum(verdicts);
+  places: z.array(
+    z.object({
+      position: z.number(),
+      problemId: z.string().nullable(),
+      outcome: z.enum(['waiting', 'open', 'right', 'partly', 'wrong']),
+    }),
+  ),
+  /** The problem to work now; null when the drill is done or the next one is not drawn yet. */
+  currentProblemId: z.string().nullable(),
+});
+export type DrillView = z.infer<typeof drillViewSchema>;
+export const drillListSchema = z.array(drillViewSchema);
 
 /** Slips a person makes, most frequent first. */
-export interface SlipView {
-  topic: Topic;
-  family: string;
-  familyTitle: string;
-  slip: string;
+export const slipViewSchema = z.object({
+  topic: z.enum(topics),
+  family: z.string(),
+  familyTitle: z.string(),
+  slip: z.string(),
   /** What the slip is, in a few words: the first sentence of its message on a sample. */
-  headline: string;
-  times: number;
-  lastAt: string;
-}
+  headline: z.string(),
+  times: z.number(),
+  lastAt: z.iso.datetime(),
+});
+export type SlipView = z.infer<typeof slipViewSchema>;
 
-export interface ProgressView {
-  levels: LevelView[];
-  answered: number;
-  right: number;
-  seconds: number;
-  slips: SlipView[];
+export const levelListSchema = z.array(levelViewSchema);
+export const progressViewSchema = z.object({
+  levels: levelListSchema,
+  answered: z.number(),
+  right: z.number(),
+  seconds: z.number(),
+  slips: z.array(slipViewSchema),
   /** Days with answers, oldest first, the last 60 at most. */
-  days: { date: string; answered: number; right: number }[];
-}
+  days: z.array(z.object({ date: z.iso.date(), answered: z.number(), right: z.number() })),
+});
+export type ProgressView = z.infer<typeof progressViewSchema>;
 
 export const newCheckpointBodySchema = z.object({
   family: z.string().min(1).max(60),
@@ -161,7 +189,5 @@ export const sampleAnswerBodySchema = z.object({
 });
 
 /** A graded answer to a visitor's sample problem; nothing of it is kept. */
-export interface SampleReply {
-  unreadable: { code: string; message: string } | null;
-  attempt: AttemptView | null;
-}
+export const sampleReplySchema = z.object({ unreadable: unreadableSchema, attempt: attemptViewSchema.nullable() });
+export type SampleReply = z.infer<typeof sampleReplySchema>;

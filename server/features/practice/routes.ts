@@ -1,9 +1,11 @@
 import { z } from 'zod';
 import {
   answerBodySchema,
+  answerReplySchema,
   hintBodySchema,
   newCheckpointBodySchema,
   partParamsSchema,
+  problemViewSchema,
   type AnswerReply,
 } from '../../../shared/contracts/practice.ts';
 import { route, type Route } from '../../http/route.ts';
@@ -22,6 +24,7 @@ export function practiceRoutes(practice: PracticeService, progress: Pick<Progres
       path: '/api/problems/:problemId',
       access: 'course',
       params: problemParams,
+      reply: problemViewSchema,
       handler: ({ person, params }) => practice.view(person, params.problemId),
     }),
     route({
@@ -30,6 +33,7 @@ export function practiceRoutes(practice: PracticeService, progress: Pick<Progres
       access: 'course',
       params: partParamsSchema,
       body: answerBodySchema,
+      reply: answerReplySchema,
       handler: async ({ person, params, body }): Promise<AnswerReply> => {
         const { unreadable, problem, levels, topic } = await practice.answer(person, params, body);
         return { unreadable, problem, level: levels && progress.levelAfter(levels, topic) };
@@ -41,6 +45,7 @@ export function practiceRoutes(practice: PracticeService, progress: Pick<Progres
       access: 'course',
       params: partParamsSchema,
       body: hintBodySchema,
+      reply: problemViewSchema,
       handler: ({ person, params, body }) => practice.hint(person, params.problemId, body.number),
     }),
     route({
@@ -48,6 +53,7 @@ export function practiceRoutes(practice: PracticeService, progress: Pick<Progres
       path: '/api/problems/:problemId/solution',
       access: 'course',
       params: problemParams,
+      reply: problemViewSchema,
       handler: ({ person, params }) => practice.giveUp(person, params.problemId),
     }),
     route({
@@ -56,6 +62,7 @@ export function practiceRoutes(practice: PracticeService, progress: Pick<Progres
       access: 'course',
       params: problemParams,
       status: 201,
+      reply: problemViewSchema,
       handler: ({ person, params }) => practice.another(person, params.problemId),
     }),
     route({
@@ -64,6 +71,7 @@ export function practiceRoutes(practice: PracticeService, progress: Pick<Progres
       access: 'course',
       params: checkpointParams,
       body: newCheckpointBodySchema,
+      reply: problemViewSchema,
       handler: ({ person, params, body }) =>
         practice.checkpoint(person, { lesson: params.slug, checkpoint: params.checkpoint }, body),
     }),

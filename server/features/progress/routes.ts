@@ -1,3 +1,4 @@
+import { levelListSchema, progressViewSchema } from '../../../shared/contracts/practice.ts';
 import { route, type Route } from '../../http/route.ts';
 import type { ProgressService } from './service.ts';
 
@@ -8,12 +9,14 @@ export function progressRoutes(progress: ProgressService): Route[] {
       method: 'get',
       path: '/api/levels',
       access: 'own-account',
+      reply: levelListSchema,
       handler: ({ person }) => progress.levels(person.id),
     }),
     route({
       method: 'get',
       path: '/api/progress',
       access: 'own-account',
+      reply: progressViewSchema,
       handler: ({ person }) => progress.progress(person.id, person.language),
     }),
   ];

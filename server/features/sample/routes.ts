@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { sampleAnswerBodySchema } from '../../../shared/contracts/practice.ts';
+import { problemViewSchema, sampleAnswerBodySchema, sampleReplySchema } from '../../../shared/contracts/practice.ts';
 import { route, type Route } from '../../http/route.ts';
 import type { SampleService } from './service.ts';
 
@@ -14,6 +14,7 @@ export function sampleRoutes(samples: SampleService): Route[] {
       access: 'welcome',
       visitors: true,
       query: sampleQuery,
+      reply: problemViewSchema,
       handler: ({ query, language }) => samples.view(query.sample, language),
     }),
     route({
@@ -22,6 +23,7 @@ export function sampleRoutes(samples: SampleService): Route[] {
       access: 'welcome',
       visitors: true,
       body: sampleAnswerBodySchema,
+      reply: sampleReplySchema,
       handler: ({ body, language }) => samples.answer(body.sample, body, language),
     }),
   ];
