@@ -5,6 +5,8 @@ import { areaRectangleLessFamily } from './families/area/area-rectangle-less.ts'
 import { areaRectangleFamily } from './families/area/area-rectangle.ts';
 import { areaTriangleFamily } from './families/area/area-triangle.ts';
 import { rateLabelBaseFamily } from './families/rate/rate-label-base.ts';
+import { ratePer1000Family } from './families/rate/rate-per-1000.ts';
+import { ratePerAcreFamily } from './families/rate/rate-per-acre.ts';
 
 // One line a family: import it here and add it to the list. Old versions stay listed below the current ones.
 
@@ -14,7 +16,9 @@ const current: readonly Family<unknown>[] = [
   areaLShapeFamily,
   areaTriangleFamily,
   areaCircleFamily,
+  ratePer1000Family,
   rateLabelBaseFamily,
+  ratePerAcreFamily,
 ];
 const old: readonly Family<unknown>[] = [];
 

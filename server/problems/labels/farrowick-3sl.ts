@@ -14,8 +14,8 @@ export const farrowick3sl: PracticeLabel = {
   strength: quantity('3', 'lb/gal'),
   signalWord: 'CAUTION',
   sites: {
-    en: 'Fence lines, paving, beds before planting',
-    es: 'Líneas de cerca, pavimento, arriates antes de plantar',
+    en: 'Fence lines, paving, turf before reseeding',
+    es: 'Líneas de cerca, pavimento, césped antes de resembrar',
   },
   pests: { en: 'All green plants that are wetted', es: 'Toda planta verde que se moje' },
   rates: [
