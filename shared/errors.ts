@@ -19,7 +19,6 @@ export const failureCodes = [
   'password-wrong',
   'token-invalid',
   'not-found',
-  'method-not-allowed',
   'too-many-requests',
   'lesson-unfinished',
   'key-reused',
