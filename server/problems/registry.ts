@@ -7,6 +7,8 @@ import { areaTriangleFamily } from './families/area/area-triangle.ts';
 import { rateLabelBaseFamily } from './families/rate/rate-label-base.ts';
 import { ratePer1000Family } from './families/rate/rate-per-1000.ts';
 import { ratePerAcreFamily } from './families/rate/rate-per-acre.ts';
+import { unitToolFamily } from './families/units/unit-tool.ts';
+import { unitVolumeFamily } from './families/units/unit-volume.ts';
 
 // One line a family: import it here and add it to the list. Old versions stay listed below the current ones.
 
@@ -16,6 +18,8 @@ const current: readonly Family<unknown>[] = [
   areaLShapeFamily,
   areaTriangleFamily,
   areaCircleFamily,
+  unitVolumeFamily,
+  unitToolFamily,
   ratePer1000Family,
   rateLabelBaseFamily,
   ratePerAcreFamily,
@@ -29,8 +33,7 @@ for (const family of current) {
   byKey.set(family.key, family);
   byVersion.set(`${family.key}@${family.version}`, family);
 }
-for (const family of old)
-  byVersion.set(`${family.key}@${family.version}`, family);
+for (const family of old) byVersion.set(`${family.key}@${family.version}`, family);
 
 /** All current families, in the order of the registry. */
 export const families: readonly Family<unknown>[] = [...byKey.values()];
