@@ -4,7 +4,7 @@ import { buildApp } from './app.ts';
 import { openDatabase } from './db/client.ts';
 import { missingMigrations } from './db/migrate.ts';
 import { EnvError, readEnv } from './env.ts';
-import { createLog, loggedError } from './http/log.ts';
+import { createLog } from './http/log.ts';
 import { smtpMail } from './outside/mail.ts';
 
 const finishWithinMs = 5_000;
@@ -28,7 +28,7 @@ const log = createLog({ level: env.LOG_LEVEL });
 const database = openDatabase({
   url: env.DATABASE_URL,
   connections: env.DATABASE_POOL,
-  onIdleError: (error) => log.error({ err: loggedError(error) }, 'a database connection was lost'),
+  onIdleError: (error) => log.error({ err: error }, 'a database connection was lost'),
 });
 const missing = await missingMigrations(database.pool).catch((error: unknown) =>
   fail(
@@ -73,7 +73,7 @@ async function stop(signal: string): Promise<void> {
 process.on('SIGTERM', () => void stop('SIGTERM'));
 process.on('SIGINT', () => void stop('SIGINT'));
 process.on('uncaughtException', (error) => {
-  log.fatal({ err: loggedError(error) }, 'a fault nobody caught');
+  log.fatal({ err: error }, 'a fault nobody caught');
   process.exitCode = 1;
   void stop('fault');
 });

@@ -27,7 +27,6 @@ export const authEndpoints: readonly AuthEndpoint[] = [
   { method: 'POST', path: '/sign-up/email', body: signUpBodySchema, counts: { limit: 'mail', by: 'email' } },
   { method: 'POST', path: '/sign-in/email', body: signInBodySchema, counts: { limit: 'password', by: 'email' } },
   { method: 'POST', path: '/sign-out', body: noBodySchema },
-  { method: 'GET', path: '/get-session' },
   { method: 'GET', path: '/verify-email', query: confirmQuerySchema },
   { method: 'POST', path: '/send-verification-email', body: emailBodySchema, counts: { limit: 'mail', by: 'email' } },
   { method: 'POST', path: '/request-password-reset', body: emailBodySchema, counts: { limit: 'mail', by: 'email' } },

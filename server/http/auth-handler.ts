@@ -64,20 +64,21 @@ async function countedFor(
   return person.id;
 }
 
+/**
+ * Only cookies and the outcome leave: better-auth's own bodies hold the session's token, which no script is to see. The
+ * client asks /api/session who is here.
+ */
 async function passBack(answer: Response, reply: Reply): Promise<void> {
   for (const cookie of answer.headers.getSetCookie()) reply.append('Set-Cookie', cookie);
-  const text = await answer.text();
   if (answer.status >= 400) {
+    const text = await answer.text();
     const said = text === '' ? {} : (JSON.parse(text) as { code?: unknown });
     const seconds = Number(answer.headers.get('x-retry-after') ?? 0);
     const retry = answer.status === 429 ? { retryAfterSeconds: Math.max(1, seconds) } : {};
     throw new AppError(authFailure(answer.status, said.code), retry);
   }
   reply.setHeader('Cache-Control', 'no-store');
-  reply
-    .status(answer.status)
-    .type('application/json')
-    .send(text === '' ? '{}' : text);
+  reply.json({ status: true });
 }
 
 /**

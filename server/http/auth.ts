@@ -11,7 +11,6 @@ import { userRole } from '../db/schema/roles.ts';
 import type { AuthMail } from './auth-mail.ts';
 import type { Background } from './background.ts';
 import { cookiePrefix } from './cookie.ts';
-import { loggedError } from './log.ts';
 import { originsOf } from './origin.ts';
 
 /** The header better-auth takes the caller's address from. Ours alone: it is overwritten on every request. */
@@ -79,7 +78,7 @@ export function buildAuth({ db, appUrl, secret, mail, background, log }: AuthDep
     trustedOrigins: originsOf(appUrl),
     database: drizzleAdapter(db, { provider: 'pg', schema: { ...tables }, transaction: true }),
     telemetry: { enabled: false },
-    logger: { level: 'error', log: (_level, _message, ...rest) => log.error({ err: loggedError(rest[0]) }, 'auth') },
+    logger: { level: 'error', log: (_level, _message, ...rest) => log.error({ err: rest[0] }, 'auth') },
     user: {
       additionalFields: {
         language: { type: 'string', required: false, defaultValue: 'en', input: true },

@@ -1,5 +1,4 @@
 import type { Logger } from 'pino';
-import { loggedError } from './log.ts';
 
 /** Work that goes on after the reply was sent, such as mail: a reply's time must not tell whether there was any. */
 export interface Background {
@@ -13,7 +12,7 @@ export function createBackground(log: Logger): Background {
   return {
     run(work) {
       const guarded = work
-        .catch((error: unknown) => log.error({ err: loggedError(error) }, 'background work failed'))
+        .catch((error: unknown) => log.error({ err: error }, 'background work failed'))
         .finally(() => pending.delete(guarded));
       pending.add(guarded);
     },

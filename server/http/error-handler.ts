@@ -1,7 +1,6 @@
 import type { ErrorRequestHandler, Response } from 'express';
 import type { Logger } from 'pino';
 import { AppError, type FailureCode } from '../../shared/errors.ts';
-import { loggedError } from './log.ts';
 import { problemByCode, problemJson } from './problem.ts';
 
 const bodyFaults: Readonly<Record<string, FailureCode>> = {
@@ -44,7 +43,7 @@ export function errorHandler(log: Logger): ErrorRequestHandler {
     const failure = asAppError(error);
     if (problemByCode[failure.code].status >= 500) {
       const id = response.getHeader('X-Request-Id');
-      log.error({ requestId: id, code: failure.code, err: loggedError(failure.cause ?? failure) }, 'request failed');
+      log.error({ requestId: id, code: failure.code, err: failure.cause ?? failure }, 'request failed');
     }
     sendProblem(response, failure);
   };

@@ -1,5 +1,6 @@
 import { existsSync } from 'node:fs';
 import { join } from 'node:path';
+import compression from 'compression';
 import express, { type Express, type Response } from 'express';
 import { AppError } from '../../shared/errors.ts';
 
@@ -18,6 +19,7 @@ function cacheFor(response: Response, path: string): void {
 export function serveClient(app: Express, folder: string): void {
   const page = join(folder, 'index.html');
   if (!existsSync(page)) return;
+  app.use(compression());
   app.use(express.static(folder, { index: false, redirect: false, setHeaders: cacheFor }));
   app.get('/{*path}', (request, response) => {
     if (/\.[a-z0-9]{2,5}$/i.test(request.path)) throw new AppError('not-found');

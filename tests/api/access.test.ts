@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { accessKeys, type AccessKey } from '../../shared/contracts/access.ts';
-import { roles, type Role } from '../../shared/vocabulary.ts';
+import { roles } from '../../shared/vocabulary.ts';
 import { access, may, scopesOf, type Column } from '../../server/http/access.ts';
 import type { Route } from '../../server/http/route.ts';
 import { signedInPerson } from '../support/factories.ts';

@@ -21,6 +21,7 @@ export interface TestApp {
   database: Database;
   mail: MemoryMail;
   background: Background;
+  beginStopping: () => void;
   /** Every line of the log so far. */
   logLines: string[];
   /** A client of our own pages: it sends the origin a browser would, and the cookie it is given. */

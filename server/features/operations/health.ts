@@ -2,7 +2,6 @@ import type { Express } from 'express';
 import type { Logger } from 'pino';
 import type { Pool } from 'pg';
 import { missingMigrations } from '../../db/migrate.ts';
-import { loggedError } from '../../http/log.ts';
 
 const answerWithinMs = 2_000;
 
@@ -29,7 +28,7 @@ async function notReady({ pool, log }: { pool: Pool; log: Logger }): Promise<str
     const missing = await Promise.race([missingMigrations(pool), late]);
     return missing === 0 ? null : 'migrations';
   } catch (error) {
-    log.error({ err: loggedError(error) }, 'not ready');
+    log.error({ err: error }, 'not ready');
     return 'database';
   } finally {
     clearTimeout(timer);
