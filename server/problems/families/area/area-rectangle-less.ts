@@ -65,32 +65,50 @@ const situations: readonly Situation<Given>[] = [
   },
 ];
 
-const layouts: Record<Tier, readonly (readonly Obstacle['kind'][])[]> = {
-  1: [['patio'], ['terrace'], ['shed'], ['playground'], ['pond'], ['bed']],
+/** What stands on the site together, and the sides of a site it fits on. */
+interface Layout {
+  readonly kinds: readonly Obstacle['kind'][];
+  readonly lengthFt: readonly [least: number, most: number];
+  readonly widthFt: readonly [least: number, most: number];
+}
+const small = { lengthFt: [40, 72], widthFt: [28, 46] } as const;
+const middle = { lengthFt: [58, 84], widthFt: [34, 50] } as const;
+const large = { lengthFt: [76, 100], widthFt: [36, 52] } as const;
+const houseLot = { lengthFt: [80, 112], widthFt: [54, 74] } as const;
+const largeHouseLot = { lengthFt: [100, 135], widthFt: [60, 78] } as const;
+
+const layouts: Record<Tier, readonly Layout[]> = {
+  1: [
+    { kinds: ['patio'], ...small },
+    { kinds: ['terrace'], ...small },
+    { kinds: ['shed'], ...small },
+    { kinds: ['playground'], ...small },
+    { kinds: ['pond'], ...small },
+    { kinds: ['bed'], ...small },
+  ],
   2: [
-    ['house', 'driveway'],
-    ['patio', 'bed'],
-    ['playground', 'shed'],
-    ['terrace', 'pond'],
-    ['house', 'patio'],
+    { kinds: ['house', 'driveway'], ...houseLot },
+    { kinds: ['house', 'patio'], ...houseLot },
+    { kinds: ['patio', 'bed'], ...middle },
+    { kinds: ['playground', 'shed'], ...middle },
+    { kinds: ['terrace', 'pond'], ...middle },
   ],
   3: [
-    ['house', 'driveway', 'patio'],
-    ['driveway', 'house', 'shed'],
-    ['bed', 'house', 'driveway'],
-    ['playground', 'terrace', 'pond'],
+    { kinds: ['house', 'driveway', 'patio'], ...largeHouseLot },
+    { kinds: ['bed', 'house', 'driveway'], ...largeHouseLot },
+    { kinds: ['playground', 'terrace', 'pond'], ...large },
+    { kinds: ['patio', 'pond', 'bed'], ...large },
   ],
 };
-const lengthFt: Record<Tier, readonly [number, number]> = { 1: [40, 80], 2: [70, 110], 3: [100, 150] };
-const widthFt: Record<Tier, readonly [number, number]> = { 1: [26, 50], 2: [50, 75], 3: [60, 90] };
 /** An obstacle too small to tell whether it was left out teaches nothing. */
-const leastShare = rational(4, 100);
+const leastShare = rational(25, 1000);
 
 function draw(rng: Rng, tier: Tier): Given | null {
   const scene = drawScene(rng, situations.length);
-  const length = rng.int(...lengthFt[tier]);
-  const width = rng.int(...widthFt[tier]);
-  const obstacles = placeObstacles(rng, { lengthFt: length, widthFt: width }, rng.pick(layouts[tier]));
+  const layout = rng.pick(layouts[tier]);
+  const length = rng.int(...layout.lengthFt);
+  const width = rng.int(...layout.widthFt);
+  const obstacles = placeObstacles(rng, { lengthFt: length, widthFt: width }, layout.kinds);
   if (!obstacles) return null;
   const g = { ...scene, length: quantity(length, 'ft'), width: quantity(width, 'ft'), obstacles };
   const least = wholeLawn(g).value.mul(leastShare);

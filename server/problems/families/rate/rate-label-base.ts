@@ -47,9 +47,9 @@ const layouts: Record<Tier, readonly (readonly Obstacle['kind'][])[]> = {
     ['bed', 'pond'],
   ],
 };
-const lengthFt: Record<Tier, readonly [number, number]> = { 1: [30, 90], 2: [45, 90], 3: [70, 120] };
-const widthFt: Record<Tier, readonly [number, number]> = { 1: [20, 60], 2: [28, 60], 3: [50, 80] };
-const leastShare = rational(4, 100);
+const lengthFt: Record<Tier, readonly [number, number]> = { 1: [30, 90], 2: [45, 90], 3: [62, 95] };
+const widthFt: Record<Tier, readonly [number, number]> = { 1: [20, 60], 2: [28, 60], 3: [38, 60] };
+const leastShare = rational(25, 1000);
 const tenth = rational('0.1');
 
 function draw(rng: Rng, tier: Tier): Given | null {
