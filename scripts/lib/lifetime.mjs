@@ -15,7 +15,7 @@ export async function lifetime(main) {
         try {
           await step();
         } catch (error) {
-          process.stderr.write(`${error instanceof Error ? error.message : error}\n`);
+          process.stderr.write(`${error instanceof Error ? error.message : String(error)}\n`);
         }
       }
       process.exit(code);

@@ -37,6 +37,7 @@ export const c0 = 0.8;
 export const phi = 0.3;
 /** What nothing is known of yet. */
 export const newAbility: Belief = { mean: 0, variance: 0.9 ** 2 };
+/** The same for one topic: how far it lies from the person's ability. */
 export const newTopic: Belief = { mean: 0, variance: 0.7 ** 2 };
 const abilityDrift = 0.1 ** 2;
 const topicDrift = 0.15 ** 2;
@@ -54,6 +55,7 @@ export function evidenceWeight(evidence: Pick<Evidence, 'right' | 'hints'>): num
   return [1, 0.6, 0.35][evidence.hints] ?? 0;
 }
 
+/** The logistic function. */
 export function sigmoid(x: number): number {
   return 1 / (1 + Math.exp(-x));
 }

@@ -24,6 +24,7 @@ export interface TopicState {
   readonly reached: boolean;
 }
 
+/** A level as it is shown. */
 export interface Level {
   readonly state: LevelState;
   /** Predicted share right on an average tier-2 problem, 0 to 1; null while not started. */

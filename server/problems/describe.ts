@@ -19,6 +19,7 @@ export interface DescribedQuantity {
   unit: string;
 }
 
+/** One part with its answer and, for numbers, its timed-set form. */
 export interface DescribedPart {
   key: string;
   topic: string;

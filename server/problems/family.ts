@@ -49,6 +49,7 @@ export interface ChoicePart extends PartBase {
   readonly kind: 'choice';
   readonly options: readonly ChoiceOption[];
 }
+/** One option of a choice. */
 export interface ChoiceOption {
   readonly key: string;
   readonly text: Text;
@@ -97,6 +98,7 @@ export interface LabelUse {
   readonly rate: string;
 }
 
+/** A problem family; `G` is what its draw gives. */
 export interface Family<G = unknown> {
   readonly key: string;
   readonly version: number;

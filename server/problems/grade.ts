@@ -36,6 +36,7 @@ export interface Unreadable {
   readonly unreadable: UnreadableCode;
 }
 
+/** Tells an entry that could not be read from a graded one. */
 export function isUnreadable(result: Graded | Unreadable): result is Unreadable {
   return 'unreadable' in result;
 }

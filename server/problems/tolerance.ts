@@ -7,6 +7,7 @@ const half = rational(1, 2);
 const onePercent = rational(1, 100);
 const none = rational(0);
 
+/** The larger of two values. */
 export function larger(a: Rational, b: Rational): Rational {
   return a.compare(b) >= 0 ? a : b;
 }
@@ -41,6 +42,7 @@ export function inPartUnit(part: NumberPart | CountPart, value: Quantity): Ratio
   return inUnit(value, part.answer.unit);
 }
 
+/** Whether a part asks for a number: a measure or a count. */
 export function isNumeric(part: Part): part is NumberPart | CountPart {
   return part.kind === 'number' || part.kind === 'count';
 }

@@ -25,6 +25,7 @@ export function asMessage(text: Text): Message {
   return { headline: { en: en[0], es: es[0] }, detail: { en: en[1], es: es[1] } };
 }
 
+/** For a right answer of any form. */
 export const rightMessage: Message = { headline: { en: 'Right.', es: 'Correcto.' }, detail: nothing };
 
 /** Right to the stated rounding, with the answer as one would measure it. */
@@ -33,6 +34,7 @@ export function rightNumber(part: NumberPart | CountPart, answer: Text): Message
   return { headline: rightMessage.headline, detail: { en: `${answer.en}.`, es: `${answer.es}.` } };
 }
 
+/** Right for the person's own earlier answer. */
 export function carriedMessage(own: Text, exact: Text): Message {
   return {
     headline: {
@@ -96,6 +98,7 @@ export function unitKindMessage(wrote: UnitKey, asked: UnitKey, sameNumber: bool
   };
 }
 
+/** The number fits another unit of the same kind. */
 export function unitNameMessage(wrote: UnitKey, fits: UnitKey): Message {
   return {
     headline: { en: 'That number belongs to another unit.', es: 'Ese número es de otra unidad.' },
@@ -106,6 +109,7 @@ export function unitNameMessage(wrote: UnitKey, fits: UnitKey): Message {
   };
 }
 
+/** Right digits, wrong power of ten. */
 export function decimalPlaceMessage(tooLarge: boolean): Message {
   return {
     headline: { en: 'The digits are right; the decimal point is not.', es: 'Las cifras están bien; el punto decimal no.' },
@@ -115,6 +119,7 @@ export function decimalPlaceMessage(tooLarge: boolean): Message {
   };
 }
 
+/** Right before rounding, wrong after. */
 export function roundingMessage(part: NumberPart): Message {
   const step = quantity(part.step, part.answer.unit);
   return {
@@ -126,6 +131,7 @@ export function roundingMessage(part: NumberPart): Message {
   };
 }
 
+/** None of the known slips. */
 export const unrecognisedMessage: Message = {
   headline: { en: 'Not right yet.', es: 'Todavía no es correcto.' },
   detail: {
@@ -134,21 +140,25 @@ export const unrecognisedMessage: Message = {
   },
 };
 
+/** Zero or less, where only more can be right. */
 export const negativeMessage: Message = {
   headline: { en: 'The answer cannot be zero or less.', es: 'La respuesta no puede ser cero ni menos.' },
   detail: { en: 'Look at which number you took away from which.', es: 'Mire qué número le restó a cuál.' },
 };
 
+/** A part of a thing, where whole things are counted. */
 export const wholeOnlyMessage: Message = {
   headline: { en: 'These are whole things.', es: 'Aquí se cuentan cosas enteras.' },
   detail: { en: 'Give a whole number.', es: 'Dé un número entero.' },
 };
 
+/** A part closed without an answer. */
 export const blankMessage: Message = {
   headline: { en: 'Left open.', es: 'Sin responder.' },
   detail: { en: 'The worked solution was shown before an answer was given.', es: 'Se mostró la solución antes de dar una respuesta.' },
 };
 
+/** The first rule an order breaks, in the words of the steps. */
 export function orderMessage(first: Text, then: Text): Message {
   return {
     headline: { en: 'Some steps are out of order.', es: 'Algunos pasos están fuera de orden.' },
@@ -174,6 +184,7 @@ export const unreadableMessages: Record<ParseProblem | 'no-such-option' | 'not-t
   'not-these-steps': { en: 'Put every step shown in order, each once.', es: 'Ordene todos los pasos, cada uno una vez.' },
   'wrong-form': { en: 'This question takes another form of answer.', es: 'Esta pregunta pide otra forma de respuesta.' },
 };
+/** Codes of what could not be read. */
 export type UnreadableCode = keyof typeof unreadableMessages;
 
 /** A quantity in both languages, rounded to at most `maxPlaces`. */

@@ -54,15 +54,19 @@ export function number(value: Rational | number | string, maxPlaces = 6): Expres
 export function words(en: string, es: string): Expression {
   return { is: 'words', text: { en, es } };
 }
+/** A product. */
 export function times(...items: Expression[]): Expression {
   return { is: 'joined', sign: '×', items };
 }
+/** A sum. */
 export function plus(...items: Expression[]): Expression {
   return { is: 'joined', sign: '+', items };
 }
+/** A difference. */
 export function minus(...items: Expression[]): Expression {
   return { is: 'joined', sign: '−', items };
 }
+/** A quotient on one line. */
 export function dividedBy(...items: Expression[]): Expression {
   return { is: 'joined', sign: '÷', items };
 }
@@ -74,15 +78,19 @@ export function equals(...items: Expression[]): Expression {
 export function about(exact: Expression, rounded: Expression): Expression {
   return { is: 'joined', sign: '≈', items: [exact, rounded] };
 }
+/** A quotient as a fraction. */
 export function over(top: Expression, bottom: Expression): Expression {
   return { is: 'over', top, bottom };
 }
+/** In parentheses. */
 export function grouped(item: Expression): Expression {
   return { is: 'grouped', item };
 }
+/** A square root. */
 export function root(item: Expression): Expression {
   return { is: 'root', item };
 }
+/** A square. */
 export function squared(item: Expression): Expression {
   return { is: 'squared', item };
 }

@@ -30,12 +30,12 @@ export function formatNumber(
   return `${sign}${whole}${decimals === '' ? '' : `.${decimals}`}`;
 }
 
-const denominators = [1n, 2n, 3n, 4n, 8n, 16n];
+const denominators = new Set([1n, 2n, 3n, 4n, 8n, 16n]);
 
 /** The number as a fraction people measure ("2 1/2", "3/4"); a decimal when none fits exactly. */
 export function formatMeasure(value: Rational, options: { maxDenominator?: number } = {}): string {
   const most = BigInt(options.maxDenominator ?? 16);
-  if (value.compare(0) < 0 || !denominators.includes(value.d) || value.d > most) return formatNumber(value);
+  if (value.compare(0) < 0 || !denominators.has(value.d) || value.d > most) return formatNumber(value);
   const whole = value.n / value.d;
   const rest = value.n % value.d;
   if (rest === 0n) return withCommas(String(whole));

@@ -7,6 +7,7 @@ export interface Quantity {
   readonly unit: UnitKey;
 }
 
+/** An exact quantity; numbers and text are read as `rational` reads them. */
 export function quantity(value: number | string | bigint | Rational, unit: UnitKey): Quantity {
   return { value: rational(value), unit };
 }
@@ -47,6 +48,7 @@ export function ratio(a: Quantity, b: Quantity): Rational {
 export function compare(a: Quantity, b: Quantity): -1 | 0 | 1 {
   return Math.sign(a.value.compare(inUnit(b, a.unit))) as -1 | 0 | 1;
 }
+/** Whether two quantities measure the same kind of thing. */
 export function sameKind(a: Quantity, b: Quantity): boolean {
   return units[a.unit].kind === units[b.unit].kind;
 }

@@ -143,6 +143,7 @@ const rows = {
 
 export type UnitKey = keyof typeof rows;
 
+/** One unit: what it measures and its exact factor. */
 export interface Unit {
   readonly key: UnitKey;
   readonly kind: Kind;
