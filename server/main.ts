@@ -61,9 +61,11 @@ async function stop(signal: string): Promise<void> {
   log.info({ signal }, 'server stopping');
   setTimeout(() => process.exit(1), 2 * finishWithinMs).unref();
   const closed = new Promise<void>((resolve) => server.close(() => resolve()));
-  server.closeIdleConnections();
+  // A connection becomes idle when its request has ended; kept alive, it would hold the server open.
+  const sweep = setInterval(() => server.closeIdleConnections(), 50);
   const cut = setTimeout(() => server.closeAllConnections(), finishWithinMs);
   await closed;
+  clearInterval(sweep);
   clearTimeout(cut);
   await background.settled();
   mail.close();
