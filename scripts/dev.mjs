@@ -18,7 +18,9 @@ await lifetime(async ({ onEnd, end }) => {
   await installPackages();
   const db = await database({ onExit: () => void end(1) });
   onEnd(() => db.stop());
-  const mail = await startProgram(tsArgs('server/fakes/mailbox/main.ts', dataPath('mailbox')), { onExit: () => undefined });
+  const mail = await startProgram(tsArgs('server/fakes/mailbox/main.ts', dataPath('mailbox')), {
+    onExit: () => undefined,
+  });
   onEnd(() => endChild(mail.child));
   const apiPort = await freePort();
   const env = serverEnv({ databaseUrl: db.url, port, mail: mail.ready, nodeEnv: 'development' });

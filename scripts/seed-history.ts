@@ -33,7 +33,20 @@ export interface HistoryPerson {
 
 const weeks = 12;
 const msPerDay = 86_400_000;
-const drillTopics: readonly Topic[] = ['area', 'units', 'rate', 'spot', 'strength', 'handheld', 'boom', 'spreader', 'tank', 'nozzle', 'equipment', 'mixing'];
+const drillTopics: readonly Topic[] = [
+  'area',
+  'units',
+  'rate',
+  'spot',
+  'strength',
+  'handheld',
+  'boom',
+  'spreader',
+  'tank',
+  'nozzle',
+  'equipment',
+  'mixing',
+];
 const tierCost = { 1: -0.7, 2: 0, 3: 0.9 } as const;
 /** Logits gained over the twelve weeks. */
 const gain = 1.4;
@@ -51,14 +64,18 @@ function rightResponse(part: Part): Response {
 }
 
 function wrongResponse(rng: Rng, problem: Problem, part: Part): Response {
-  if (part.kind === 'choice') return { kind: 'choice', option: rng.pick(part.options.filter((option) => !option.right)).key };
+  if (part.kind === 'choice')
+    return { kind: 'choice', option: rng.pick(part.options.filter((option) => !option.right)).key };
   if (part.kind === 'order') {
     const [first, ...rest] = part.steps.map((step) => step.key);
     return { kind: 'order', steps: [...rest, first as string] };
   }
   const slips = problem.slips.filter((live) => live.part === part.key);
   if (slips.length === 0 || rng.chance(1, 6)) {
-    return { kind: 'number', text: formatQuantity({ value: part.answer.value.mul('1.37'), unit: part.answer.unit }, { maxPlaces: 2 }) };
+    return {
+      kind: 'number',
+      text: formatQuantity({ value: part.answer.value.mul('1.37'), unit: part.answer.unit }, { maxPlaces: 2 }),
+    };
   }
   // People have habits: the first slip of a family is made more often than the last.
   const slip = rng.chance(1, 2) ? (slips[0] as (typeof slips)[number]) : rng.pick(slips);
@@ -92,14 +109,25 @@ async function workProblem(options: {
     const open = reply.problem.parts.find((one) => one.key === part.key)?.state === 'open';
     if (open && rng.chance(2, 3)) {
       clock.at += 30_000;
-      await practice.answer(worker, target, { key: uuidv7({ msecs: clock.at }), response: rightResponse(part), seconds: 30 });
+      await practice.answer(worker, target, {
+        key: uuidv7({ msecs: clock.at }),
+        response: rightResponse(part),
+        seconds: 30,
+      });
     }
   }
   const view = await practice.view(worker, problemId);
   if (view.state === 'open') await practice.giveUp(worker, problemId);
 }
 
-async function workDay(options: { rng: Rng; database: Database; zone: string; person: HistoryPerson; clock: Clock; share: number }) {
+async function workDay(options: {
+  rng: Rng;
+  database: Database;
+  zone: string;
+  person: HistoryPerson;
+  clock: Clock;
+  share: number;
+}) {
   const { rng, database, zone, person, clock, share } = options;
   const now = () => new Date(clock.at);
   const newId = () => uuidv7({ msecs: (clock.at += 1) });
@@ -122,11 +150,21 @@ async function workDay(options: { rng: Rng; database: Database; zone: string; pe
 }
 
 /** Writes one person's history, ending today. */
-async function seedPerson(options: { database: Database; zone: string; person: HistoryPerson; today: Date }): Promise<void> {
+async function seedPerson(options: {
+  database: Database;
+  zone: string;
+  person: HistoryPerson;
+  today: Date;
+}): Promise<void> {
   const { database, zone, person, today } = options;
   const rng = makeRng(`history/${person.seed}`);
   const span = weeks * 7;
-  const days = rng.sample(Array.from({ length: span }, (_, index) => index + 1), person.days).sort((a, b) => b - a);
+  const days = rng
+    .sample(
+      Array.from({ length: span }, (_, index) => index + 1),
+      person.days,
+    )
+    .sort((a, b) => b - a);
   for (const daysAgo of days) {
     const clock = { at: today.getTime() - daysAgo * msPerDay - rng.int(0, 4 * 3600) * 1000 };
     await workDay({ rng, database, zone, person, clock, share: 1 - daysAgo / span });

@@ -16,7 +16,9 @@ const readySeconds = 20;
 async function waitUntilReady(port, child) {
   const deadline = Date.now() + readySeconds * 1000;
   while (Date.now() < deadline && child.exitCode === null) {
-    const ready = await fetch(`http://127.0.0.1:${port}/readyz`).then((reply) => reply.ok).catch(() => false);
+    const ready = await fetch(`http://127.0.0.1:${port}/readyz`)
+      .then((reply) => reply.ok)
+      .catch(() => false);
     if (ready) return;
     await pause(50);
   }
@@ -25,9 +27,11 @@ async function waitUntilReady(port, child) {
 
 await lifetime(async ({ onEnd, end }) => {
   const port = Number(process.env.PORT || 4180);
-  if (!Number.isInteger(port) || port < 1 || port > 65_535) throw new Plain(`PORT must be a port number, got "${process.env.PORT}".`);
+  if (!Number.isInteger(port) || port < 1 || port > 65_535)
+    throw new Plain(`PORT must be a port number, got "${process.env.PORT}".`);
   onEnd(claim('start'));
-  if (!(await isFree(port))) throw new Plain(`Port ${port} is in use. Stop what uses it, or choose another: PORT=4190 npm start`);
+  if (!(await isFree(port)))
+    throw new Plain(`Port ${port} is in use. Stop what uses it, or choose another: PORT=4190 npm start`);
   await installPackages();
   const db = await database({
     onExit: () => {
@@ -41,11 +45,18 @@ await lifetime(async ({ onEnd, end }) => {
   onEnd(() => void (stopping = true));
   const mail = process.env.SMTP_URL
     ? null
-    : await startProgram([join(root, 'dist/server/mailbox.js'), dataPath('mailbox')], { onExit: () => !stopping && void end(1) });
+    : await startProgram([join(root, 'dist/server/mailbox.js'), dataPath('mailbox')], {
+        onExit: () => !stopping && void end(1),
+      });
   onEnd(() => endChild(mail?.child));
   const env = serverEnv({ databaseUrl: db.url, port, mail: mail?.ready, nodeEnv: 'production' });
   await prepareDatabase(env);
-  const server = spawn(process.execPath, [join(root, 'dist/server/main.js')], { cwd: root, env, stdio: ['ignore', 'inherit', 'inherit'], detached: true });
+  const server = spawn(process.execPath, [join(root, 'dist/server/main.js')], {
+    cwd: root,
+    env,
+    stdio: ['ignore', 'inherit', 'inherit'],
+    detached: true,
+  });
   server.on('exit', (code) => {
     if (!stopping) void end(code ?? 1);
   });

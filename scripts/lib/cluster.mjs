@@ -1,6 +1,16 @@
 import { createHash, randomBytes } from 'node:crypto';
 import { spawn } from 'node:child_process';
-import { chmodSync, chownSync, existsSync, mkdirSync, openSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import {
+  chmodSync,
+  chownSync,
+  existsSync,
+  mkdirSync,
+  openSync,
+  readdirSync,
+  readFileSync,
+  rmSync,
+  writeFileSync,
+} from 'node:fs';
 import { createConnection } from 'node:net';
 import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
@@ -28,7 +38,10 @@ async function clusterFolder(name, ids) {
   const hash = createHash('sha256').update(home).digest('hex').slice(0, 16);
   const elsewhere = join('/var/tmp', `tankmark-${hash}`);
   mkdirSync(elsewhere, { recursive: true });
-  writeFileSync(join(home, 'WHERE'), `The database's files lie in ${elsewhere}, since its account cannot reach this folder.\n`);
+  writeFileSync(
+    join(home, 'WHERE'),
+    `The database's files lie in ${elsewhere}, since its account cannot reach this folder.\n`,
+  );
   return elsewhere;
 }
 
@@ -48,7 +61,18 @@ async function initialize({ bin, files, ids, secret, fast }) {
   writeFileSync(secretFile, secret, { mode: 0o600 });
   if (ids.uid !== undefined) for (const path of [files, secretFile]) chownSync(path, ids.uid, ids.gid);
   try {
-    const options = ['-D', files, '-U', 'tankmark', '-E', 'UTF8', '--locale=C.UTF-8', '-A', 'scram-sha-256', `--pwfile=${secretFile}`];
+    const options = [
+      '-D',
+      files,
+      '-U',
+      'tankmark',
+      '-E',
+      'UTF8',
+      '--locale=C.UTF-8',
+      '-A',
+      'scram-sha-256',
+      `--pwfile=${secretFile}`,
+    ];
     if (fast) options.push('--no-sync');
     await must('initdb', join(bin, 'initdb'), options, { ...ids, cwd: '/', env: postgresEnv() });
   } finally {
@@ -82,7 +106,8 @@ async function recover(files) {
     process.kill(pid, 'SIGINT');
     if (!(await waitUntilGone(pid, stopSeconds))) {
       process.kill(pid, 'SIGQUIT');
-      if (!(await waitUntilGone(pid, stopSeconds))) throw new Plain(`An earlier database (process ${pid}) does not stop.`);
+      if (!(await waitUntilGone(pid, stopSeconds)))
+        throw new Plain(`An earlier database (process ${pid}) does not stop.`);
     }
   }
   rmSync(file, { force: true });
@@ -110,22 +135,38 @@ export async function startCluster({ name, fast = false, onExit = () => undefine
   const secret = password(dataPath(name));
   const files = join(home, 'cluster');
   const version = /\/(\d+)\/bin$/.exec(bin)?.[1];
-  const made = existsSync(join(files, 'TANKMARK_READY')) && readFileSync(join(files, 'PG_VERSION'), 'utf8').trim() === version;
+  const made =
+    existsSync(join(files, 'TANKMARK_READY')) && readFileSync(join(files, 'PG_VERSION'), 'utf8').trim() === version;
   if (existsSync(join(files, 'TANKMARK_READY')) && !made) {
-    throw new Plain(`The database in ${files} was made by another PostgreSQL version than ${version}. Move it away, or dump and restore it.`);
+    throw new Plain(
+      `The database in ${files} was made by another PostgreSQL version than ${version}. Move it away, or dump and restore it.`,
+    );
   }
   if (made) await recover(files);
   else await initialize({ bin, files, ids, secret, fast });
 
   const port = await freePort();
-  const settings = { listen_addresses: '127.0.0.1', unix_socket_directories: '', port, max_connections: 200, shared_buffers: '128MB', log_min_messages: 'warning' };
+  const settings = {
+    listen_addresses: '127.0.0.1',
+    unix_socket_directories: '',
+    port,
+    max_connections: 200,
+    shared_buffers: '128MB',
+    log_min_messages: 'warning',
+  };
   if (fast) Object.assign(settings, { fsync: 'off', synchronous_commit: 'off', full_page_writes: 'off' });
   const args = ['-D', files, ...Object.entries(settings).flatMap(([key, value]) => ['-c', `${key}=${value}`])];
   const logFile = join(dataPath(name), 'postgres.log');
   const log = openSync(logFile, 'a');
   chmodSync(logFile, 0o600);
   // Detached: Ctrl-C must reach the product first, which then stops the database in its own time.
-  const child = spawn(join(bin, 'postgres'), args, { ...ids, cwd: '/', env: postgresEnv(), stdio: ['ignore', log, log], detached: true });
+  const child = spawn(join(bin, 'postgres'), args, {
+    ...ids,
+    cwd: '/',
+    env: postgresEnv(),
+    stdio: ['ignore', log, log],
+    detached: true,
+  });
   let exited = false;
   let stopping = false;
   child.on('exit', (code) => {

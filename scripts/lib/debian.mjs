@@ -22,7 +22,10 @@ const versions = '/usr/lib/postgresql';
 function findPostgres() {
   if (!existsSync(versions)) return null;
   const found = readdirSync(versions)
-    .filter((version) => existsSync(join(versions, version, 'bin', 'initdb')) && existsSync(join(versions, version, 'bin', 'postgres')))
+    .filter(
+      (version) =>
+        existsSync(join(versions, version, 'bin', 'initdb')) && existsSync(join(versions, version, 'bin', 'postgres')),
+    )
     .sort((a, b) => Number(b) - Number(a))[0];
   return found === undefined ? null : join(versions, found, 'bin');
 }
@@ -39,7 +42,8 @@ export async function postgresBin() {
   }
   await aptInstall(['postgresql'], 'PostgreSQL');
   const installed = findPostgres();
-  if (!installed) throw new Plain('PostgreSQL was installed, but its programs were not found under /usr/lib/postgresql.');
+  if (!installed)
+    throw new Plain('PostgreSQL was installed, but its programs were not found under /usr/lib/postgresql.');
   return installed;
 }
 

@@ -15,7 +15,12 @@ function secret() {
 
 /** Starts a program that prints one line of JSON when it is ready. */
 export function startProgram(args, { env = cleanEnv(), onExit }) {
-  const child = spawn(process.execPath, args, { cwd: root, env, stdio: ['ignore', 'pipe', 'inherit', 'ipc'], detached: true });
+  const child = spawn(process.execPath, args, {
+    cwd: root,
+    env,
+    stdio: ['ignore', 'pipe', 'inherit', 'ipc'],
+    detached: true,
+  });
   child.on('exit', (code) => onExit(code));
   return new Promise((resolve, reject) => {
     let text = '';

@@ -48,7 +48,10 @@ function isFunction(node: ts.Node): node is ts.FunctionLikeDeclaration {
 
 function returnsJsx(node: ts.Node): boolean {
   return (
-    ts.isJsxElement(node) || ts.isJsxSelfClosingElement(node) || ts.isJsxFragment(node) || !!ts.forEachChild(node, (child) => returnsJsx(child) || undefined)
+    ts.isJsxElement(node) ||
+    ts.isJsxSelfClosingElement(node) ||
+    ts.isJsxFragment(node) ||
+    !!ts.forEachChild(node, (child) => returnsJsx(child) || undefined)
   );
 }
 
@@ -149,8 +152,19 @@ export function documentation(files: readonly SourceFile[]): Measure {
   for (const file of files) {
     if (!documentedFolders.test(file.path) || familyFolder.test(file.path)) continue;
     for (const statement of file.tree.statements) {
-      const exported = ts.canHaveModifiers(statement) && ts.getModifiers(statement)?.some((one) => one.kind === ts.SyntaxKind.ExportKeyword);
-      if (!exported || !(ts.isFunctionDeclaration(statement) || ts.isVariableStatement(statement) || ts.isInterfaceDeclaration(statement) || ts.isClassDeclaration(statement))) continue;
+      const exported =
+        ts.canHaveModifiers(statement) &&
+        ts.getModifiers(statement)?.some((one) => one.kind === ts.SyntaxKind.ExportKeyword);
+      if (
+        !exported ||
+        !(
+          ts.isFunctionDeclaration(statement) ||
+          ts.isVariableStatement(statement) ||
+          ts.isInterfaceDeclaration(statement) ||
+          ts.isClassDeclaration(statement)
+        )
+      )
+        continue;
       if (ts.getJSDocCommentsAndTags(statement).length > 0) continue;
       places.push(`${file.path}:${file.tree.getLineAndCharacterOfPosition(statement.getStart()).line + 1}`);
     }
@@ -185,5 +199,10 @@ export function duplication(files: readonly SourceFile[]): Measure {
     }
   });
   const percent = (100 * repeated.size) / Math.max(1, total);
-  return { name: 'percent of lines in repeated blocks', figure: Number(percent.toFixed(2)), bar: bars.duplicatedPercent, places: [...places] };
+  return {
+    name: 'percent of lines in repeated blocks',
+    figure: Number(percent.toFixed(2)),
+    bar: bars.duplicatedPercent,
+    places: [...places],
+  };
 }

@@ -1,5 +1,13 @@
 import { describe, expect, test } from 'vitest';
-import { authorsDifficulty, evidenceWeight, forgettingGap, newAbility, newTopic, update, type Evidence } from './estimate.ts';
+import {
+  authorsDifficulty,
+  evidenceWeight,
+  forgettingGap,
+  newAbility,
+  newTopic,
+  update,
+  type Evidence,
+} from './estimate.ts';
 import { chanceAtMark, levelOf, normalCdf, type TopicState } from './level.ts';
 
 const plain: Evidence = { right: true, hints: 0, guess: 0, daysSince: null, difficulty: authorsDifficulty(2) };
@@ -71,7 +79,8 @@ describe('the level shown', () => {
     const mixed = [true, false, true, true, false, true, true, true];
     const some = after(mixed);
     const many = after([...mixed, ...mixed, ...mixed]);
-    const width = (level: ReturnType<typeof levelOf>) => (level.range ? level.range.high - level.range.low : Number.NaN);
+    const width = (level: ReturnType<typeof levelOf>) =>
+      level.range ? level.range.high - level.range.low : Number.NaN;
     const a = levelOf(some.ability, state(some, 8));
     const b = levelOf(many.ability, state(many, 24));
     for (const level of [a, b]) {
@@ -81,7 +90,13 @@ describe('the level shown', () => {
     expect(width(b)).toBeLessThan(width(a));
   });
   test('the normal distribution function at table values (NIST/SEMATECH e-Handbook, 1.3.6.7.1)', () => {
-    for (const [x, p] of [[0, 0.5], [1, 0.84134], [1.28, 0.89973], [1.96, 0.975], [-1, 0.15866]] as const) {
+    for (const [x, p] of [
+      [0, 0.5],
+      [1, 0.84134],
+      [1.28, 0.89973],
+      [1.96, 0.975],
+      [-1, 0.15866],
+    ] as const) {
       expect(normalCdf(x)).toBeCloseTo(p, 4);
     }
   });

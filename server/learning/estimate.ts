@@ -75,7 +75,10 @@ export function expectedRight(mean: number, variance: number): number {
  * @param before ability `g` and topic deviation `s` before the answer
  * @returns both after it; constant time
  */
-export function update(before: { ability: Belief; topic: Belief }, evidence: Evidence): { ability: Belief; topic: Belief } {
+export function update(
+  before: { ability: Belief; topic: Belief },
+  evidence: Evidence,
+): { ability: Belief; topic: Belief } {
   const { ability, topic } = before;
   const { family, variant } = evidence.difficulty;
   const mean = c0 + ability.mean + topic.mean - forgettingGap(evidence.daysSince) - family.mean - variant.mean;

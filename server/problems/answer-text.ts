@@ -26,7 +26,10 @@ export function roundedAnswer(part: NumberPart | CountPart): Text {
   const value = roundedValue(part);
   const places = part.kind === 'count' ? 0 : placesOf(part.step);
   const text = (locale: 'en' | 'es') =>
-    formatQuantity(value, placesOf(part.kind === 'count' ? value.value : part.step) === 6 ? { locale, maxPlaces: 4 } : { locale, places });
+    formatQuantity(
+      value,
+      placesOf(part.kind === 'count' ? value.value : part.step) === 6 ? { locale, maxPlaces: 4 } : { locale, places },
+    );
   return { en: text('en'), es: text('es') };
 }
 

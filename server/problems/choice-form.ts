@@ -39,7 +39,9 @@ function carriedCandidates(problem: Problem, part: NumberPart | CountPart): Cand
     if (live.part >= part.key) continue;
     const earlierPart = problem.parts.find((one) => one.key === live.part);
     if (!earlierPart || !isNumeric(earlierPart)) continue;
-    const earlier = { [live.part]: quantity(live.value, earlierPart.answer.unit) } as Partial<Record<PartKey, Quantity>>;
+    const earlier = { [live.part]: quantity(live.value, earlierPart.answer.unit) } as Partial<
+      Record<PartKey, Quantity>
+    >;
     const own = partsGivenEarlier(problem, earlier).find((one) => one.key === part.key);
     if (own && isNumeric(own)) found.push({ value: inPartUnit(part, own.answer), slip: `carried:${live.key}` });
   }
@@ -69,11 +71,15 @@ function generalCandidates(part: NumberPart | CountPart): Candidate[] {
  * @throws RangeError when four options that far apart cannot be found
  */
 export function choiceForm(problem: Problem, part: NumberPart | CountPart): readonly NumberOption[] {
-  const rng = makeRng(`options/${problem.key.family}/${problem.key.version}/${problem.key.tier}/${problem.key.seed}/${part.key}`);
+  const rng = makeRng(
+    `options/${problem.key.family}/${problem.key.version}/${problem.key.tier}/${problem.key.seed}/${part.key}`,
+  );
   const step = part.kind === 'count' ? rational(1) : part.step;
   const round = (value: Rational) => roundToStep(value, step);
   const right = round(part.answer.value);
-  const own = problem.slips.filter((live) => live.part === part.key).map((live) => ({ value: live.value, slip: live.key }));
+  const own = problem.slips
+    .filter((live) => live.part === part.key)
+    .map((live) => ({ value: live.value, slip: live.key }));
   const candidates: Candidate[] = [
     ...rng.shuffle(own),
     ...rng.shuffle(carriedCandidates(problem, part)),

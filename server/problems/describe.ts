@@ -120,7 +120,12 @@ export function describe(problem: Problem, locale: Locale): DescribedProblem {
       const part = problem.parts.find((one) => one.key === live.part);
       if (!part || !isNumeric(part)) throw new Error(`slip ${live.key} belongs to no numeric part`);
       const answer = { value: live.value, unit: part.answer.unit };
-      return { key: live.key, part: live.part, answer: describeQuantity(answer), message: live.slip.message(given, {})[locale] };
+      return {
+        key: live.key,
+        part: live.part,
+        answer: describeQuantity(answer),
+        message: live.slip.message(given, {})[locale],
+      };
     }),
     hints: family.hints(given).map((hint) => hint[locale]),
     solution: family.working(given).map((line) => lineToPlain(line, locale)),

@@ -73,7 +73,9 @@ function checkGrading(problem: Problem): void {
     gradePart({ problem, part, response: { kind: 'number', text }, earlier: {}, locale: 'en' });
   for (const part of problem.parts.filter(isNumeric)) {
     const right = typed(part.key, roundedAnswer(part).en);
-    expect(isUnreadable(right) ? right : right.verdict, `${problem.key.family} "${roundedAnswer(part).en}"`).toBe('right');
+    expect(isUnreadable(right) ? right : right.verdict, `${problem.key.family} "${roundedAnswer(part).en}"`).toBe(
+      'right',
+    );
     for (const live of problem.slips.filter((one) => one.part === part.key)) {
       const graded = typed(part.key, live.value.toFraction());
       expect(isUnreadable(graded) ? graded : graded.slip, `${problem.key.family} ${live.key}`).toBe(live.key);
@@ -109,7 +111,8 @@ function checkTexts(family: Family<unknown>, problem: Problem): void {
       if (sum.test(`${told.statement} ${JSON.stringify(told.figure)} ${JSON.stringify(told.label)}`)) continue;
       for (const hint of told.hints) expect(hint, `${where}: hint gives the answer ${answer}`).not.toMatch(sum);
       for (const slip of told.slips) {
-        if (slip.part === part.key) expect(slip.message, `${where}: ${slip.key} gives the answer ${answer}`).not.toMatch(sum);
+        if (slip.part === part.key)
+          expect(slip.message, `${where}: ${slip.key} gives the answer ${answer}`).not.toMatch(sum);
       }
     }
   }

@@ -69,7 +69,9 @@ function matchedSlip({ part, value }: Entry, problem: Problem, earlier: Earlier)
     if (own) consider(live.key, inPartUnit(part, own), text(earlier));
   }
   const found = best as { key: string; message: say.Message } | null;
-  return found && { verdict: 'slip', slip: found.key, value: quantity(value, part.answer.unit), message: found.message };
+  return (
+    found && { verdict: 'slip', slip: found.key, value: quantity(value, part.answer.unit), message: found.message }
+  );
 }
 
 function unitName({ part, typed }: Entry): Omit<Graded, 'read'> | null {
@@ -78,7 +80,12 @@ function unitName({ part, typed }: Entry): Omit<Graded, 'read'> | null {
     (unit) => unit !== typed.unit && isRight(part, inUnit(quantity(typed.value, unit), asked)),
   );
   if (!fits || units[fits].offset) return null;
-  return { verdict: 'unit-name', slip: 'unit-name', value: inAsked(part, typed), message: say.unitNameMessage(typed.unit, fits) };
+  return {
+    verdict: 'unit-name',
+    slip: 'unit-name',
+    value: inAsked(part, typed),
+    message: say.unitNameMessage(typed.unit, fits),
+  };
 }
 
 function inAsked(part: NumberPart | CountPart, typed: Quantity): Quantity {
@@ -157,5 +164,11 @@ export function gradeNumber(options: {
     rounding(entry);
   if (found) return { read, ...found };
   const whole = part.kind === 'count' && placesOf(entry.value) > 0;
-  return { read, verdict: 'unrecognised', slip: null, value, message: whole ? say.wholeOnlyMessage : say.unrecognisedMessage };
+  return {
+    read,
+    verdict: 'unrecognised',
+    slip: null,
+    value,
+    message: whole ? say.wholeOnlyMessage : say.unrecognisedMessage,
+  };
 }

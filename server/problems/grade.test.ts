@@ -47,11 +47,36 @@ const lawn: Family<unknown> = defineFamily<Given>({
   hints: () => [text('1'), text('2'), text('3')],
   working: () => [],
   slips: [
-    { key: 'left-in-obstacle', part: 'a', answer: ({ whole }) => whole, message: () => text('The patio is still in your area. Take it off.') },
-    { key: 'added-obstacle', part: 'a', answer: () => quantity(2000, 'sq-ft'), message: () => text('You added the patio. It comes off.') },
-    { key: 'full-label-amount', part: 'b', answer: () => quantity('1.5', 'fl-oz'), message: () => text('That is for 1,000 sq ft. Scale it.') },
-    { key: 'half-the-spoons', part: 'c', answer: () => quantity('2.4', 'tbsp'), message: () => text('That is the fluid ounces. Turn them into spoons.') },
-    { key: 'same-as-the-answer', part: 'b', answer: () => quantity('2.41', 'fl-oz'), message: () => text('Collides. Always.') },
+    {
+      key: 'left-in-obstacle',
+      part: 'a',
+      answer: ({ whole }) => whole,
+      message: () => text('The patio is still in your area. Take it off.'),
+    },
+    {
+      key: 'added-obstacle',
+      part: 'a',
+      answer: () => quantity(2000, 'sq-ft'),
+      message: () => text('You added the patio. It comes off.'),
+    },
+    {
+      key: 'full-label-amount',
+      part: 'b',
+      answer: () => quantity('1.5', 'fl-oz'),
+      message: () => text('That is for 1,000 sq ft. Scale it.'),
+    },
+    {
+      key: 'half-the-spoons',
+      part: 'c',
+      answer: () => quantity('2.4', 'tbsp'),
+      message: () => text('That is the fluid ounces. Turn them into spoons.'),
+    },
+    {
+      key: 'same-as-the-answer',
+      part: 'b',
+      answer: () => quantity('2.41', 'fl-oz'),
+      message: () => text('Collides. Always.'),
+    },
   ],
 });
 const problem = generate(lawn, { seed: '1', tier: 2 });
@@ -80,9 +105,12 @@ describe('slips of a draw', () => {
 });
 
 describe('grading one number', () => {
-  test.each(['2.4', '2,4 fl oz', '2 2/5', '4.8 Tbsp', '71 mL', '2.42', '2.36', '~2.4', '14.4 tsp'])('%s is right', (typed) => {
-    expect(verdict('b', typed)).toBe('right');
-  });
+  test.each(['2.4', '2,4 fl oz', '2 2/5', '4.8 Tbsp', '71 mL', '2.42', '2.36', '~2.4', '14.4 tsp'])(
+    '%s is right',
+    (typed) => {
+      expect(verdict('b', typed)).toBe('right');
+    },
+  );
   test('just outside half a step it is not', () => {
     expect(verdict('b', '2.45')).toBe('right');
     expect(verdict('b', '2.4501')).toBe('rounding');
@@ -120,14 +148,26 @@ describe('grading one number', () => {
     expect(verdict('b', '2.4', { a })).toBe('right');
   });
   test('an entry in another form is refused, not graded', () => {
-    const result = gradePart({ problem, part: 'a', response: { kind: 'choice', option: 'x' }, earlier: {}, locale: 'en' });
+    const result = gradePart({
+      problem,
+      part: 'a',
+      response: { kind: 'choice', option: 'x' },
+      earlier: {},
+      locale: 'en',
+    });
     expect(result).toEqual({ unreadable: 'wrong-form' });
     expect(() =>
       gradePart({ problem, part: 'f', response: { kind: 'number', text: '1' }, earlier: {}, locale: 'en' }),
     ).toThrow(RangeError);
   });
   test('a slip is told with its first sentence as the headline', () => {
-    const result = gradePart({ problem, part: 'a', response: { kind: 'number', text: '1,800' }, earlier: {}, locale: 'en' });
+    const result = gradePart({
+      problem,
+      part: 'a',
+      response: { kind: 'number', text: '1,800' },
+      earlier: {},
+      locale: 'en',
+    });
     expect(isUnreadable(result) ? null : result.message).toEqual({
       headline: text('The patio is still in your area.'),
       detail: text('Take it off.'),

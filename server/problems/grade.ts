@@ -50,9 +50,21 @@ function gradeChoice(part: ChoicePart, option: string): Graded | Unreadable {
   const chosen = part.options.find((one) => one.key === option);
   if (!chosen) return { unreadable: 'no-such-option' };
   if (chosen.right) {
-    return { verdict: 'right', slip: null, read: chosen.text, value: null, message: { ...rightMessage, detail: chosen.reason } };
+    return {
+      verdict: 'right',
+      slip: null,
+      read: chosen.text,
+      value: null,
+      message: { ...rightMessage, detail: chosen.reason },
+    };
   }
-  return { verdict: 'slip', slip: chosen.slip ?? chosen.key, read: chosen.text, value: null, message: asMessage(chosen.reason) };
+  return {
+    verdict: 'slip',
+    slip: chosen.slip ?? chosen.key,
+    read: chosen.text,
+    value: null,
+    message: asMessage(chosen.reason),
+  };
 }
 
 /** The first rule an order breaks, as [should come first, should come after]; null when it keeps all. */
@@ -72,7 +84,8 @@ function gradeOrder(problem: Problem, part: OrderPart, order: readonly string[])
   if (order.length !== texts.size || all.size !== texts.size || !order.every((key) => texts.has(key))) {
     return { unreadable: 'not-these-steps' };
   }
-  const joined = (locale: Locale) => order.map((key, index) => `${index + 1}. ${texts.get(key)?.[locale] ?? ''}`).join(' ');
+  const joined = (locale: Locale) =>
+    order.map((key, index) => `${index + 1}. ${texts.get(key)?.[locale] ?? ''}`).join(' ');
   const read: Text = { en: joined('en'), es: joined('es') };
   const broken = brokenRule(part, order);
   if (!broken) return { verdict: 'right', slip: null, read, value: null, message: rightMessage };

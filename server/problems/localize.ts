@@ -18,5 +18,7 @@ export function localize<T>(value: T, locale: Locale): Localized<T> {
   if (value === null || typeof value !== 'object') return value as Localized<T>;
   if (isText(value)) return value[locale] as Localized<T>;
   if (Array.isArray(value)) return value.map((item) => localize(item, locale)) as Localized<T>;
-  return Object.fromEntries(Object.entries(value).map(([key, inner]) => [key, localize(inner, locale)])) as Localized<T>;
+  return Object.fromEntries(
+    Object.entries(value).map(([key, inner]) => [key, localize(inner, locale)]),
+  ) as Localized<T>;
 }

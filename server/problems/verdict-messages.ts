@@ -84,7 +84,10 @@ export function unitKindMessage(wrote: UnitKey, asked: UnitKey, sameNumber: bool
     : nothing;
   const mix =
     kindOf(wrote) === 'weight' && kindOf(asked) === 'volume'
-      ? { en: ' An ounce on a scale is not a fluid ounce in a measuring cup.', es: ' Una onza de balanza no es una onza líquida.' }
+      ? {
+          en: ' An ounce on a scale is not a fluid ounce in a measuring cup.',
+          es: ' Una onza de balanza no es una onza líquida.',
+        }
       : nothing;
   return {
     headline: {
@@ -112,10 +115,19 @@ export function unitNameMessage(wrote: UnitKey, fits: UnitKey): Message {
 /** Right digits, wrong power of ten. */
 export function decimalPlaceMessage(tooLarge: boolean): Message {
   return {
-    headline: { en: 'The digits are right; the decimal point is not.', es: 'Las cifras están bien; el punto decimal no.' },
+    headline: {
+      en: 'The digits are right; the decimal point is not.',
+      es: 'Las cifras están bien; el punto decimal no.',
+    },
     detail: tooLarge
-      ? { en: 'Your answer is ten times too large, or more. Estimate first: what size must it be?', es: 'Su respuesta es diez veces mayor, o más. Estime primero: ¿de qué tamaño debe ser?' }
-      : { en: 'Your answer is ten times too small, or more. Estimate first: what size must it be?', es: 'Su respuesta es diez veces menor, o más. Estime primero: ¿de qué tamaño debe ser?' },
+      ? {
+          en: 'Your answer is ten times too large, or more. Estimate first: what size must it be?',
+          es: 'Su respuesta es diez veces mayor, o más. Estime primero: ¿de qué tamaño debe ser?',
+        }
+      : {
+          en: 'Your answer is ten times too small, or more. Estimate first: what size must it be?',
+          es: 'Su respuesta es diez veces menor, o más. Estime primero: ¿de qué tamaño debe ser?',
+        },
   };
 }
 
@@ -123,7 +135,10 @@ export function decimalPlaceMessage(tooLarge: boolean): Message {
 export function roundingMessage(part: NumberPart): Message {
   const step = quantity(part.step, part.answer.unit);
   return {
-    headline: { en: 'Your working looks right; the rounding is not.', es: 'El cálculo parece correcto; el redondeo no.' },
+    headline: {
+      en: 'Your working looks right; the rounding is not.',
+      es: 'El cálculo parece correcto; el redondeo no.',
+    },
     detail: {
       en: `Round once, at the end, to the nearest ${formatQuantity(step, { locale: 'en' })}.`,
       es: `Redondee una sola vez, al final, a ${formatQuantity(step, { locale: 'es' })}.`,
@@ -155,7 +170,10 @@ export const wholeOnlyMessage: Message = {
 /** A part closed without an answer. */
 export const blankMessage: Message = {
   headline: { en: 'Left open.', es: 'Sin responder.' },
-  detail: { en: 'The worked solution was shown before an answer was given.', es: 'Se mostró la solución antes de dar una respuesta.' },
+  detail: {
+    en: 'The worked solution was shown before an answer was given.',
+    es: 'Se mostró la solución antes de dar una respuesta.',
+  },
 };
 
 /** The first rule an order breaks, in the words of the steps. */
@@ -172,17 +190,41 @@ export function orderMessage(first: Text, then: Text): Message {
 /** Why an entry could not be read, and what would be understood. */
 export const unreadableMessages: Record<ParseProblem | 'no-such-option' | 'not-these-steps' | 'wrong-form', Text> = {
   empty: { en: 'Enter a number first.', es: 'Escriba primero un número.' },
-  'no-number': { en: 'There is no number in this. Write one like 2.4 or 2 1/2.', es: 'Aquí no hay un número. Escriba uno como 2.4 o 2 1/2.' },
-  'two-numbers': { en: 'There are two numbers in this. Write one, like 2.4 or 2 1/2.', es: 'Aquí hay dos números. Escriba uno, como 2.4 o 2 1/2.' },
-  'unknown-unit': { en: 'This unit is not known here. Choose one from the list.', es: 'Esta unidad no se conoce aquí. Elija una de la lista.' },
+  'no-number': {
+    en: 'There is no number in this. Write one like 2.4 or 2 1/2.',
+    es: 'Aquí no hay un número. Escriba uno como 2.4 o 2 1/2.',
+  },
+  'two-numbers': {
+    en: 'There are two numbers in this. Write one, like 2.4 or 2 1/2.',
+    es: 'Aquí hay dos números. Escriba uno, como 2.4 o 2 1/2.',
+  },
+  'unknown-unit': {
+    en: 'This unit is not known here. Choose one from the list.',
+    es: 'Esta unidad no se conoce aquí. Elija una de la lista.',
+  },
   'zero-denominator': { en: 'A fraction cannot have 0 below the line.', es: 'Una fracción no puede tener 0 abajo.' },
-  'too-long': { en: 'This is too long. Write one number and its unit.', es: 'Es demasiado largo. Escriba un número y su unidad.' },
+  'too-long': {
+    en: 'This is too long. Write one number and its unit.',
+    es: 'Es demasiado largo. Escriba un número y su unidad.',
+  },
   'mixed-kinds': { en: 'The units in this do not go together.', es: 'Las unidades no van juntas.' },
-  'ambiguous-comma': { en: 'The comma can be read two ways. Write 1250 or 1.25.', es: 'La coma se puede leer de dos modos. Escriba 1250 o 1.25.' },
-  'not-a-number': { en: 'This cannot be read as a number. Write one like 2.4 or 2 1/2.', es: 'No se puede leer como número. Escriba uno como 2.4 o 2 1/2.' },
+  'ambiguous-comma': {
+    en: 'The comma can be read two ways. Write 1250 or 1.25.',
+    es: 'La coma se puede leer de dos modos. Escriba 1250 o 1.25.',
+  },
+  'not-a-number': {
+    en: 'This cannot be read as a number. Write one like 2.4 or 2 1/2.',
+    es: 'No se puede leer como número. Escriba uno como 2.4 o 2 1/2.',
+  },
   'no-such-option': { en: 'Choose one of the answers shown.', es: 'Elija una de las respuestas.' },
-  'not-these-steps': { en: 'Put every step shown in order, each once.', es: 'Ordene todos los pasos, cada uno una vez.' },
-  'wrong-form': { en: 'This question takes another form of answer.', es: 'Esta pregunta pide otra forma de respuesta.' },
+  'not-these-steps': {
+    en: 'Put every step shown in order, each once.',
+    es: 'Ordene todos los pasos, cada uno una vez.',
+  },
+  'wrong-form': {
+    en: 'This question takes another form of answer.',
+    es: 'Esta pregunta pide otra forma de respuesta.',
+  },
 };
 /** Codes of what could not be read. */
 export type UnreadableCode = keyof typeof unreadableMessages;

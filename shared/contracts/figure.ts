@@ -78,8 +78,4 @@ export interface MeasuresFigure<S = string> {
 }
 
 export type Figure<S = string> =
-  | PlanFigure<S>
-  | BoomFigure<S>
-  | TankFigure<S>
-  | NozzlePatternFigure<S>
-  | MeasuresFigure<S>;
+  PlanFigure<S> | BoomFigure<S> | TankFigure<S> | NozzlePatternFigure<S> | MeasuresFigure<S>;

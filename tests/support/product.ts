@@ -37,7 +37,10 @@ async function finished(child: ChildProcess, what: string): Promise<void> {
 
 async function ready(url: string): Promise<void> {
   for (let tenth = 0; tenth < readySeconds * 10; tenth += 1) {
-    const ok = await fetch(`${url}/readyz`).then((reply) => reply.ok, () => false);
+    const ok = await fetch(`${url}/readyz`).then(
+      (reply) => reply.ok,
+      () => false,
+    );
     if (ok) return;
     await pause(100);
   }

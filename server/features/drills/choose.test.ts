@@ -17,7 +17,9 @@ const topicOf = (key: string) => families.find((family) => family.key === key)?.
 
 describe('what a drill asks next', () => {
   test('rising goes from tier 1 by thirds to tier 3', () => {
-    expect(Array.from({ length: 10 }, (_, index) => tierAt('rising', index + 1, 10))).toEqual([1, 1, 1, 1, 2, 2, 2, 3, 3, 3]);
+    expect(Array.from({ length: 10 }, (_, index) => tierAt('rising', index + 1, 10))).toEqual([
+      1, 1, 1, 1, 2, 2, 2, 3, 3, 3,
+    ]);
   });
   test('topics take turns', () => {
     const topics = run(['area', 'rate'], 2, 10).map((choice) => topicOf(choice.family));

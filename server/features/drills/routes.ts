@@ -1,5 +1,10 @@
 import { z } from 'zod';
-import { drillListSchema, drillViewSchema, newDrillBodySchema, problemViewSchema } from '../../../shared/contracts/practice.ts';
+import {
+  drillListSchema,
+  drillViewSchema,
+  newDrillBodySchema,
+  problemViewSchema,
+} from '../../../shared/contracts/practice.ts';
 import { route, type Route } from '../../http/route.ts';
 import type { DrillService } from './service.ts';
 

@@ -47,9 +47,16 @@ export function drillService(repo: DrillRepo, practice: Pick<PracticeService, 'c
   return {
     async create(worker: Worker, wanted: NewDrillBody): Promise<DrillView> {
       const topics = [...new Set(wanted.topics)];
-      if (!topics.some((topic) => families.some((family) => family.topic === topic))) throw new AppError('nothing-to-drill');
+      if (!topics.some((topic) => families.some((family) => family.topic === topic)))
+        throw new AppError('nothing-to-drill');
       const id = uuidv7();
-      const row = { userId: worker.id, id, topics, tier: String(wanted.tier) as DrillRow['tier'], length: wanted.length };
+      const row = {
+        userId: worker.id,
+        id,
+        topics,
+        tier: String(wanted.tier) as DrillRow['tier'],
+        length: wanted.length,
+      };
       await repo.create(row);
       const saved = await load(worker.id, id);
       return drillView(saved.row, saved.problems);
@@ -62,8 +69,16 @@ export function drillService(repo: DrillRepo, practice: Pick<PracticeService, 'c
 
     async recent(worker: Worker): Promise<DrillView[]> {
       const rows = await repo.recent(worker.id, recentCount);
-      const problems = await repo.problems(worker.id, rows.map((row) => row.id));
-      return rows.map((row) => drillView(row, problems.filter((problem) => problem.drillId === row.id)));
+      const problems = await repo.problems(
+        worker.id,
+        rows.map((row) => row.id),
+      );
+      return rows.map((row) =>
+        drillView(
+          row,
+          problems.filter((problem) => problem.drillId === row.id),
+        ),
+      );
     },
 
     /** The drill's open problem, or the next one; two presses at once get the same problem. */
@@ -83,7 +98,10 @@ export function drillService(repo: DrillRepo, practice: Pick<PracticeService, 'c
       });
       if (!choice) throw new AppError('nothing-to-drill');
       try {
-        return await practice.view(worker, await practice.create(worker, choice, { context: 'drill', drillId: id, position }));
+        return await practice.view(
+          worker,
+          await practice.create(worker, choice, { context: 'drill', drillId: id, position }),
+        );
       } catch (error) {
         // The place was taken by the same press sent twice: what stands there is the answer to both.
         const there = (await repo.problems(worker.id, [id])).find((problem) => problem.position === position);

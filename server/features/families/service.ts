@@ -65,10 +65,17 @@ export function familyService() {
       if (!family) throw new AppError('not-found');
       const chosen = family.tiers.filter((tier) => query.tier === undefined || tier === query.tier);
       if (chosen.length === 0) throw new AppError('not-found');
-      const seeds = Array.from({ length: query.count }, (_, index) => (index === 0 ? query.seed : `${query.seed}-${index + 1}`));
+      const seeds = Array.from({ length: query.count }, (_, index) =>
+        index === 0 ? query.seed : `${query.seed}-${index + 1}`,
+      );
       return {
         family: summary(family, locale),
-        sources: family.sources.map(({ title, publisher, year, ref }) => ({ title, publisher, year, ref: ref ?? null })),
+        sources: family.sources.map(({ title, publisher, year, ref }) => ({
+          title,
+          publisher,
+          year,
+          ref: ref ?? null,
+        })),
         samples: chosen.flatMap((tier) => seeds.map((seed) => sample(family, { seed, tier, locale }))),
       };
     },

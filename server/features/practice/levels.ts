@@ -74,4 +74,3 @@ export function dayIn(zone: string, at: Date): string {
   }
   return formatter.format(at);
 }
-

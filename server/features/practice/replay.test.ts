@@ -22,7 +22,17 @@ function answer(problem: Problem, standing: Standing, rows: LoggedAnswer[], part
   const attempt = rows.filter((row) => row.part === part).length + 1;
   const value = graded.value?.value.toFraction() ?? null;
   const { verdict, slip } = graded;
-  const row: LoggedAnswer = { part, response, read: graded.read.en, value, verdict, slip, attempt, isFirst: attempt === 1, key: `${rows.length}` };
+  const row: LoggedAnswer = {
+    part,
+    response,
+    read: graded.read.en,
+    value,
+    verdict,
+    slip,
+    attempt,
+    isFirst: attempt === 1,
+    key: `${rows.length}`,
+  };
   rows.push(row);
   take(standing, { row, graded });
   return row;
@@ -58,7 +68,8 @@ describe('a problem replayed from its log', () => {
     answer(problem, standing, rows, 'a', slip?.value.toFraction() ?? '');
     answer(problem, standing, rows, 'a', right(problem, 'a'));
     expect(earlierFor(standing, 'b')).toEqual({});
-    for (const part of ['b', 'c'] as const) expect(answer(problem, standing, rows, part, right(problem, part)).verdict).toBe('right');
+    for (const part of ['b', 'c'] as const)
+      expect(answer(problem, standing, rows, part, right(problem, part)).verdict).toBe('right');
     expect(isDone(problem, standing)).toBe(true);
   });
 
@@ -77,7 +88,9 @@ describe('a problem replayed from its log', () => {
     for (const part of ['a', 'b', 'c'] as const) answer(problem, standing, rows, part, right(problem, part));
     const done = problemView({ problem, standing, place, locale: 'en' });
     expect(done.state).toBe('done');
-    expect(done.parts.map((part) => part.answerText)).toEqual(['a', 'b', 'c'].map((part) => right(problem, part as PartKey)));
+    expect(done.parts.map((part) => part.answerText)).toEqual(
+      ['a', 'b', 'c'].map((part) => right(problem, part as PartKey)),
+    );
     expect(done.working?.at(-1)?.html).toContain('<math');
   });
 });

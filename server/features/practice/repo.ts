@@ -1,6 +1,7 @@
 import { and, desc, eq, isNotNull, sql } from 'drizzle-orm';
 import type { NodePgDatabase } from 'drizzle-orm/node-postgres';
 import type { Pool } from 'pg';
+import { AppError } from '../../../shared/errors.ts';
 import type { Context, Tier, Topic } from '../../../shared/vocabulary.ts';
 import { problem } from '../../db/schema/practice.ts';
 import type { LoggedAnswer } from './replay.ts';
@@ -73,6 +74,17 @@ export interface RecordWrite {
   at: Date;
 }
 
+/** The values of `recordSql`, in the order of its placeholders. */
+function recordValues(write: RecordWrite): unknown[] {
+  const { userId, sequence, ability, problem: own, at, answers, topics, slips, day, closed } = write;
+  return [
+    ...[userId, sequence, ability.mean, ability.variance],
+    ...[own.id, own.family, own.version, own.tier, own.context, at],
+    ...[answers, topics, slips].map((list) => JSON.stringify(list)),
+    ...[day.day, day.answered, day.right, day.seconds, closed],
+  ];
+}
+
 /** Reads and writes of problems put before people and of the answer log. */
 export function practiceRepo(db: NodePgDatabase, pool: Pool) {
   return {
@@ -88,33 +100,24 @@ export function practiceRepo(db: NodePgDatabase, pool: Pool) {
       );
     },
 
-    /** Records answers and what follows from them, all or nothing; false when the person's sequence has moved on. */
+    /**
+     * Records answers and what follows from them, all or nothing; false when the person's sequence has moved on.
+     * @throws AppError `key-reused` when the key already stands beside an answer to another problem
+     */
     async record(write: RecordWrite): Promise<boolean> {
-      const { rows } = await pool.query<{ recorded: number }>({
-        name: 'practice-record',
-        text: recordSql,
-        values: [
-          write.userId,
-          write.sequence,
-          write.ability.mean,
-          write.ability.variance,
-          write.problem.id,
-          write.problem.family,
-          write.problem.version,
-          write.problem.tier,
-          write.problem.context,
-          write.at,
-          JSON.stringify(write.answers),
-          JSON.stringify(write.topics),
-          JSON.stringify(write.slips),
-          write.day.day,
-          write.day.answered,
-          write.day.right,
-          write.day.seconds,
-          write.closed,
-        ],
-      });
-      return (rows[0]?.recorded ?? 0) > 0;
+      try {
+        const { rows } = await pool.query<{ recorded: number }>({
+          name: 'practice-record',
+          text: recordSql,
+          values: recordValues(write),
+        });
+        return (rows[0]?.recorded ?? 0) > 0;
+      } catch (error) {
+        if (error instanceof Error && 'constraint' in error && error.constraint === 'answer_once') {
+          throw new AppError('key-reused', { cause: error });
+        }
+        throw error;
+      }
     },
 
     async create(row: NewProblem): Promise<void> {

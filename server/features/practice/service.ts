@@ -55,7 +55,9 @@ function choicesOf(part: Part): number {
 function placeOf(loaded: Loaded): Place {
   const { id, hints, drillId, position, drillLength } = loaded.problem;
   const drill =
-    drillId !== null && position !== null && drillLength !== null ? { id: drillId, position, length: drillLength } : null;
+    drillId !== null && position !== null && drillLength !== null
+      ? { id: drillId, position, length: drillLength }
+      : null;
   return { id, hints, drill };
 }
 
@@ -103,7 +105,10 @@ function answerWrite(options: { id: string; row: LoggedAnswer; addition: Additio
 export function practiceService({ repo, zone, now, newId = () => uuidv7() }: PracticeDeps) {
   const problems = problemCache();
 
-  async function open(worker: Worker, problemId: string): Promise<{ loaded: Loaded; problem: Problem; standing: Standing }> {
+  async function open(
+    worker: Worker,
+    problemId: string,
+  ): Promise<{ loaded: Loaded; problem: Problem; standing: Standing }> {
     const loaded = await repo.load(worker.id, problemId);
     if (!loaded) throw new AppError('not-found');
     const problem = problems.get(loaded.problem);
@@ -192,7 +197,16 @@ export function practiceService({ repo, zone, now, newId = () => uuidv7() }: Pra
     const { version } = family;
     const seed = randomSeed();
     problems.get({ family: family.key, version, seed, tier: choice.tier });
-    await repo.create({ userId: worker.id, id, family: family.key, version, seed, tier: choice.tier, shownAt: now(), ...place });
+    await repo.create({
+      userId: worker.id,
+      id,
+      family: family.key,
+      version,
+      seed,
+      tier: choice.tier,
+      shownAt: now(),
+      ...place,
+    });
     return id;
   }
 
@@ -224,7 +238,13 @@ export function practiceService({ repo, zone, now, newId = () => uuidv7() }: Pra
         }
         if (standing.closed.has(part.key)) throw new AppError('part-closed');
         const earlier = earlierFor(standing, part.key);
-        const graded = gradePart({ problem, part: part.key, response: sent.response, earlier, locale: worker.language });
+        const graded = gradePart({
+          problem,
+          part: part.key,
+          response: sent.response,
+          earlier,
+          locale: worker.language,
+        });
         if (isUnreadable(graded)) {
           unreadable = { code: graded.unreadable, message: unreadableMessages[graded.unreadable][worker.language] };
           return null;
@@ -275,7 +295,8 @@ export function practiceService({ repo, zone, now, newId = () => uuidv7() }: Pra
       wanted: { family: string; tier: Tier; fresh: boolean },
     ): Promise<ProblemView> {
       const latest = wanted.fresh ? null : await repo.latestCheckpoint(worker.id, at.lesson, at.checkpoint);
-      const id = latest?.family === wanted.family ? latest.id : await create(worker, wanted, { context: 'checkpoint', ...at });
+      const id =
+        latest?.family === wanted.family ? latest.id : await create(worker, wanted, { context: 'checkpoint', ...at });
       return view(worker, id);
     },
 

@@ -35,7 +35,10 @@ export function sampleService() {
       if (!partOf(problem, sent.part)) throw new AppError('not-found');
       const graded = gradePart({ problem, part: sent.part, response: sent.response, earlier: {}, locale });
       if (isUnreadable(graded)) {
-        return { unreadable: { code: graded.unreadable, message: unreadableMessages[graded.unreadable][locale] }, attempt: null };
+        return {
+          unreadable: { code: graded.unreadable, message: unreadableMessages[graded.unreadable][locale] },
+          attempt: null,
+        };
       }
       const row = {
         part: sent.part,

@@ -8,11 +8,8 @@ import { given, minus, times, type WorkingLine } from '../../working.ts';
 import { boxDimensions, drawn } from './plan-parts.ts';
 
 /** Something on a lawn that is not treated. */
-export interface ObstacleKind {
-  readonly key: string;
+interface ObstacleKind {
   readonly the: Text;
-  /** Spanish with "de" before it: "del patio". */
-  readonly of: Text;
   readonly ground: Ground;
   /** Sides it is found in, in feet; both drawn in steps of `step`. */
   readonly acrossFt: readonly [least: number, most: number];
@@ -23,68 +20,65 @@ export interface ObstacleKind {
 }
 
 const kind = (
-  key: string,
   name: readonly [en: string, article: 'el' | 'la', es: string],
-  rest: Omit<ObstacleKind, 'key' | 'the' | 'of'>,
+  rest: Omit<ObstacleKind, 'the'>,
 ): ObstacleKind => ({
-  key,
   the: { en: `the ${name[0]}`, es: `${name[1]} ${name[2]}` },
-  of: { en: `of the ${name[0]}`, es: name[1] === 'el' ? `del ${name[2]}` : `de la ${name[2]}` },
   ...rest,
 });
 
 /** Kinds of obstacles by size: a building first, then what a small lawn may hold. */
 export const obstacleKinds = {
-  house: kind('house', ['house', 'la', 'casa'], {
+  house: kind(['house', 'la', 'casa'], {
     ground: 'building',
     acrossFt: [32, 52],
     deepFt: [24, 38],
     stepFt: 2,
     lies: 'free',
   }),
-  driveway: kind('driveway', ['driveway', 'la', 'entrada de autos'], {
+  driveway: kind(['driveway', 'la', 'entrada de autos'], {
     ground: 'hard',
     acrossFt: [10, 20],
     deepFt: [24, 48],
     stepFt: 2,
     lies: 'near',
   }),
-  patio: kind('patio', ['patio', 'el', 'patio'], {
+  patio: kind(['patio', 'el', 'patio'], {
     ground: 'hard',
     acrossFt: [12, 24],
     deepFt: [10, 20],
     stepFt: 1,
     lies: 'far',
   }),
-  terrace: kind('terrace', ['paved terrace', 'la', 'terraza'], {
+  terrace: kind(['paved terrace', 'la', 'terraza'], {
     ground: 'hard',
     acrossFt: [15, 30],
     deepFt: [10, 20],
     stepFt: 1,
     lies: 'far',
   }),
-  shed: kind('shed', ['shed', 'el', 'cobertizo'], {
+  shed: kind(['shed', 'el', 'cobertizo'], {
     ground: 'building',
     acrossFt: [10, 18],
     deepFt: [8, 14],
     stepFt: 1,
     lies: 'far',
   }),
-  playground: kind('playground', ['playground', 'el', 'área de juegos'], {
+  playground: kind(['playground', 'el', 'área de juegos'], {
     ground: 'soil',
     acrossFt: [18, 30],
     deepFt: [14, 24],
     stepFt: 1,
     lies: 'free',
   }),
-  pond: kind('pond', ['garden pond', 'el', 'estanque'], {
+  pond: kind(['garden pond', 'el', 'estanque'], {
     ground: 'water',
     acrossFt: [12, 24],
     deepFt: [10, 16],
     stepFt: 1,
     lies: 'free',
   }),
-  bed: kind('bed', ['flower bed', 'el', 'arriate de flores'], {
+  bed: kind(['flower bed', 'el', 'arriate de flores'], {
     ground: 'bed',
     acrossFt: [12, 30],
     deepFt: [8, 14],
