@@ -53,7 +53,15 @@ export function buildApp(deps: AppDeps): BuiltApp {
   const background = createBackground(log);
   const tries = accountTries(pool);
   const sessions = sessionFinder({ pool, secret: env.AUTH_SECRET, appUrl });
-  const auth = buildAuth({ db, appUrl, secret: env.AUTH_SECRET, mail: authMail({ mail, appUrl }), background, log });
+  const auth = buildAuth({
+    db,
+    appUrl,
+    secret: env.AUTH_SECRET,
+    mail: authMail({ mail, appUrl }),
+    background,
+    log,
+    onNewPassword: (email) => tries.forgive('password', email),
+  });
   const { dropUnconfirmed } = accountRepo(db);
   const routes = featureRoutes({ env, database, auth, tries, now, contentFolder: deps.contentFolder });
   let stopping = false;

@@ -30,10 +30,8 @@ const database = openDatabase({
   connections: env.DATABASE_POOL,
   onIdleError: (error) => log.error({ err: error }, 'a database connection was lost'),
 });
-const missing = await missingMigrations(database.pool).catch((error: unknown) =>
-  fail(
-    `The database does not answer (${String((error as { code?: unknown }).code ?? 'no connection')}). Check DATABASE_URL.`,
-  ),
+const missing = await missingMigrations(database.pool).catch((error: NodeJS.ErrnoException) =>
+  fail(`The database does not answer (${error.code ?? 'no connection'}). Check DATABASE_URL.`),
 );
 if (missing > 0) fail(`The database lacks ${missing} migration(s). Run the migrations, then start again.`);
 

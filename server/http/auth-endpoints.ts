@@ -49,6 +49,8 @@ const codes: Readonly<Record<string, FailureCode>> = {
   TOKEN_EXPIRED: 'token-invalid',
   USER_NOT_FOUND: 'token-invalid',
   INVALID_USER: 'token-invalid',
+  // Two sign-ups of one address at the same moment.
+  FAILED_TO_CREATE_USER: 'busy',
   INVALID_ORIGIN: 'foreign-origin',
   MISSING_OR_NULL_ORIGIN: 'foreign-origin',
   CROSS_SITE_NAVIGATION_LOGIN_BLOCKED: 'foreign-origin',

@@ -11,6 +11,7 @@ import { userRole } from '../db/schema/roles.ts';
 import type { AuthMail } from './auth-mail.ts';
 import type { Background } from './background.ts';
 import { cookiePrefix } from './cookie.ts';
+import { withoutAddresses } from './log.ts';
 import { originsOf } from './origin.ts';
 
 /** The header better-auth takes the caller's address from. Ours alone: it is overwritten on every request. */
@@ -24,6 +25,8 @@ export interface AuthDeps {
   mail: AuthMail;
   background: Background;
   log: Logger;
+  /** Told when a password was chosen anew: whoever was kept out by guesses at it may try again. */
+  onNewPassword: (email: string) => Promise<void>;
 }
 
 async function grantTrainee(db: Db, userId: string): Promise<void> {
@@ -68,7 +71,7 @@ const rateLimit = {
 };
 
 /** better-auth with our tables, our mail and our limits. */
-export function buildAuth({ db, appUrl, secret, mail, background, log }: AuthDeps) {
+export function buildAuth({ db, appUrl, secret, mail, background, log, onNewPassword }: AuthDeps) {
   const guard = guards(db);
   return betterAuth({
     appName: 'Tankmark',
@@ -78,7 +81,10 @@ export function buildAuth({ db, appUrl, secret, mail, background, log }: AuthDep
     trustedOrigins: originsOf(appUrl),
     database: drizzleAdapter(db, { provider: 'pg', schema: { ...tables }, transaction: true }),
     telemetry: { enabled: false },
-    logger: { level: 'error', log: (_level, _message, ...rest) => log.error({ err: rest[0] }, 'auth') },
+    logger: {
+      level: 'error',
+      log: (_level, message, ...rest) => log.error({ err: rest[0] }, `auth: ${withoutAddresses(message)}`),
+    },
     user: {
       additionalFields: {
         language: { type: 'string', required: false, defaultValue: 'en', input: true },
@@ -97,6 +103,7 @@ export function buildAuth({ db, appUrl, secret, mail, background, log }: AuthDep
       revokeSessionsOnPasswordReset: true,
       resetPasswordTokenExpiresIn: 3_600,
       sendResetPassword: ({ user, token }) => mail.reset(user, token),
+      onPasswordReset: ({ user }) => onNewPassword(user.email),
       onExistingUserSignUp: ({ user }) => mail.alreadyHere(user),
     },
     emailVerification: {

@@ -4,6 +4,11 @@ import pino, { type DestinationStream, type Logger } from 'pino';
 const address = /[^\s@<>"']+@[^\s@<>"']+/g;
 const mostCauses = 3;
 
+/** A text of a library's, without the addresses it may name. */
+export function withoutAddresses(text: string): string {
+  return text.replace(address, '[address]');
+}
+
 /** What may be logged of an error: names, codes and places in the code, nothing a person typed. */
 export function loggedError(error: unknown, depth = 0): Record<string, unknown> {
   if (!(error instanceof Error)) return { type: typeof error };
@@ -15,7 +20,7 @@ export function loggedError(error: unknown, depth = 0): Record<string, unknown> 
     ...(typeof code === 'string' ? { code } : {}),
     ...(typeof constraint === 'string' ? { constraint } : {}),
     ...(typeof table === 'string' ? { table } : {}),
-    ...(fromDatabase ? {} : { message: error.message.replace(address, '[address]') }),
+    ...(fromDatabase ? {} : { message: withoutAddresses(error.message) }),
     stack: (error.stack ?? '')
       .split('\n')
       .filter((line) => line.startsWith('    at '))

@@ -214,6 +214,13 @@ describe('limits', () => {
     expect(blocked.body).toMatchObject({ code: 'too-many-requests' });
     expect(Number(blocked.headers['retry-after'])).toBeGreaterThan(60);
     expect((await test.as(person.cookie).get('/api/me')).status).toBe(200);
+
+    // Whoever can read the mail is not kept out by a stranger's guesses.
+    await test.as().post('/api/auth/request-password-reset', { email: person.email });
+    await test.background.settled();
+    const token = linkIn(test.mail.latestTo(person.email)).searchParams.get('token');
+    await test.as().post('/api/auth/reset-password', { token, newPassword: 'chosen after the guesses' });
+    expect((await guess('chosen after the guesses')).status).toBe(200);
   });
 
   it('sends only so many messages to one address', async () => {
