@@ -44,6 +44,8 @@ export interface Place {
   readonly the: Text;
   /** "of the library" / "de la biblioteca"; Spanish also after "detrás", "al lado", "enfrente". */
   readonly of: Text;
+  /** "to the library" / "a la biblioteca"; Spanish also after "junto". */
+  readonly to: Text;
   /** "at the library" / "en la biblioteca" */
   readonly at: Text;
 }
@@ -53,6 +55,7 @@ function place(key: string, en: string, article: 'el' | 'la', es: string): Place
     key,
     the: { en: `the ${en}`, es: `${article} ${es}` },
     of: { en: `of the ${en}`, es: article === 'el' ? `del ${es}` : `de la ${es}` },
+    to: { en: `to the ${en}`, es: article === 'el' ? `al ${es}` : `a la ${es}` },
     at: { en: `at the ${en}`, es: `en ${article} ${es}` },
   };
 }

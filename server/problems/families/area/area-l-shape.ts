@@ -23,7 +23,7 @@ const situations: readonly Situation<Given>[] = [
     heading: { en: 'Turf beside a building', es: 'Césped junto a un edificio' },
     statement: (g) => ({
       en: en`The turf beside ${g.place.the} makes ${an(g)}. All of it gets treated ${g.season}. The sides on the plan are in feet (ft).`,
-      es: es`El césped junto a ${g.place.the} forma una ${g.shape}. Se trata todo ${g.season}. Los lados del plano están en pies.`,
+      es: es`El césped junto ${g.place.to} forma una ${g.shape}. Se trata todo ${g.season}. Los lados del plano están en pies.`,
     }),
   },
   {

@@ -70,8 +70,8 @@ const strips: readonly Situation<RectangleGiven>[] = [
   {
     heading: { en: 'A bed along a wall', es: 'Un arriate junto al muro' },
     statement: (g) => ({
-      en: en`A narrow bed runs along the wall ${g.place.of}. It is treated ${g.season}, before the weeds come up. The bed is ${sides(g)}.`,
-      es: es`Un arriate angosto corre junto al muro ${g.place.of}. Se trata ${g.season}, antes de que broten las malezas. El arriate mide ${sides(g)}.`,
+      en: en`A narrow bed runs along the wall ${g.place.of}. It is treated ${g.season} to keep weeds from coming up. The bed is ${sides(g)}.`,
+      es: es`Un arriate angosto corre junto al muro ${g.place.of}. Se trata ${g.season} para que no broten malezas. El arriate mide ${sides(g)}.`,
     }),
   },
   {

@@ -23,6 +23,7 @@ const lawn: LabelBaseGiven = {
     key: 'clinic',
     the: { en: 'the clinic', es: 'la clínica' },
     of: { en: 'of the clinic', es: 'de la clínica' },
+    to: { en: 'to the clinic', es: 'a la clínica' },
     at: { en: 'at the clinic', es: 'en la clínica' },
   },
   season: { en: 'in early spring', es: 'a principios de la primavera' },

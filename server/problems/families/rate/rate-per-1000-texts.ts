@@ -54,7 +54,7 @@ export const perThousandSituations: readonly Situation<PerThousandGiven>[] = [
     heading: { en: 'Before leaving the yard', es: 'Antes de salir de la bodega' },
     statement: (g) => ({
       en: en`${g.person} loads the truck for ${g.place.the}. One job there is a ${site(g)}, to be treated once with ${labelName(g.line)}. ${facts(g)}`,
-      es: es`${g.person} carga la camioneta para ir a ${g.place.the}. Un trabajo allí es un ${site(g)}, que se trata una vez con ${labelName(g.line)}. ${facts(g)}`,
+      es: es`${g.person} carga la camioneta para ir ${g.place.to}. Un trabajo allí es un ${site(g)}, que se trata una vez con ${labelName(g.line)}. ${facts(g)}`,
     }),
   },
   {
@@ -67,8 +67,8 @@ export const perThousandSituations: readonly Situation<PerThousandGiven>[] = [
   {
     heading: { en: 'An amount for the record', es: 'Una cantidad para el registro' },
     statement: (g) => ({
-      en: en`Before spraying at ${g.place.the}, ${g.person} writes down how much ${labelName(g.line)} the job takes. ${facts(g)} The rate is on the practice label.`,
-      es: es`Antes de rociar ${g.place.at}, ${g.person} anota cuánto ${labelName(g.line)} lleva el trabajo. ${facts(g)} La dosis está en la etiqueta de práctica.`,
+      en: en`Before spraying at ${g.place.the}, ${g.person} writes down how much ${labelName(g.line)} the job takes. ${facts(g)} Go by the practice label.`,
+      es: es`Antes de rociar ${g.place.at}, ${g.person} anota cuánto ${labelName(g.line)} lleva el trabajo. ${facts(g)} Guíese por la etiqueta de práctica.`,
     }),
   },
 ];

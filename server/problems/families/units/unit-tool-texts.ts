@@ -69,13 +69,13 @@ export const toolSituations: readonly Situation<UnitToolGiven>[] = [
     heading: { en: 'The cup stayed at the shop', es: 'La taza se quedó en el taller' },
     statement: (g) => ({
       en: en`At ${g.place.the}, ${g.person} finds that the usual measure stayed at the shop. There is ${tool(g)}. The job takes ${firstUse(g.gallons)} of spray with ${product(g)}. ${rate(g)}`,
-      es: es`En el trabajo ${g.place.at}, ${g.person} ve que la medida de siempre se quedó en el taller. Hay ${tool(g)}. Se necesitan ${firstUse(g.gallons)} de mezcla con ${product(g)}. ${rate(g)}`,
+      es: es`En el trabajo ${g.place.at}, ${g.person} ve que la medida de siempre se quedó en el taller. Hay ${tool(g)}. El trabajo lleva ${firstUse(g.gallons)} de mezcla con ${product(g)}. ${rate(g)}`,
     }),
   },
   {
     heading: { en: 'Mixing for a small job', es: 'Mezcla para un trabajo pequeño' },
     statement: (g) => ({
-      en: en`${capital(g.season)} a small job ${g.place.at} takes ${firstUse(g.gallons)} of spray with ${product(g)}. ${rate(g)} ${g.person} measures with ${tool(g)}.`,
+      en: en`${capital(g.season)} a small job ${g.place.at} takes ${firstUse(g.gallons)} of spray with ${product(g)}. ${rate(g)} ${g.person} uses ${tool(g)}.`,
       es: es`${capital(g.season)} un trabajo pequeño ${g.place.at} lleva ${firstUse(g.gallons)} de mezcla con ${product(g)}. ${rate(g)} ${g.person} mide con ${tool(g)}.`,
     }),
   },
