@@ -1,0 +1,97 @@
+import { useStore } from '@nanostores/react';
+import { Link, NavLink, Outlet, ScrollRestoration, useNavigation } from 'react-router';
+import type { MeView } from '../../shared/contracts/account.ts';
+import { shellMessages } from '../i18n/shell.ts';
+import { mayDo, useSession } from '../lib/session.ts';
+import { paths } from '../paths.ts';
+import { ButtonLink } from '../ui/button.tsx';
+import { Mark } from '../ui/mark.tsx';
+
+const railLink =
+  'flex min-h-11 items-center justify-center border-t-[3px] border-transparent px-2 text-sm font-medium text-ink no-underline wide:justify-start wide:border-t-0 wide:border-l-[3px] wide:px-2.5 wide:text-base aria-[current=page]:border-dye aria-[current=page]:bg-dye-wash aria-[current=page]:font-bold';
+
+function Rail({ me, mailbox }: { me: MeView; mailbox: boolean }) {
+  const t = useStore(shellMessages);
+  const links = [
+    [paths.today, t.today],
+    [paths.course, t.course],
+    [paths.drills, t.drills],
+    [paths.progress, t.progress],
+    [paths.account, t.account],
+    ...(mayDo(me, 'proof-sheet') ? [[paths.families, t.families] as const] : []),
+  ] as const;
+  return (
+    <nav
+      aria-label={t.main}
+      className="fixed inset-x-0 bottom-0 z-20 border-t border-rule bg-sheet pb-[env(safe-area-inset-bottom)] wide:sticky wide:top-0 wide:flex wide:h-screen wide:w-[13.5rem] wide:flex-none wide:flex-col wide:border-t-0 wide:border-r wide:bg-transparent wide:py-6 wide:pr-4 wide:pl-6"
+    >
+      <Link to={paths.welcome} aria-label={t.welcome} className="mb-6 hidden items-end gap-2 text-ink no-underline wide:flex">
+        <Mark />
+        <span className="font-serif text-[1.375rem] leading-none font-bold tracking-tight">Tankmark</span>
+      </Link>
+      <ul className="flex justify-around wide:block">
+        {links.map(([to, text]) => (
+          <li key={to} className="wide:mb-1">
+            <NavLink to={to} className={railLink}>
+              {text}
+            </NavLink>
+          </li>
+        ))}
+      </ul>
+      <div className="mt-auto hidden text-sm text-ink-soft wide:block">
+        {mailbox && (
+          <Link to={paths.mailbox} className="mb-3 inline-flex min-h-6 items-center">
+            {t.mailbox}
+          </Link>
+        )}
+        <p className="break-words">{me.name}</p>
+      </div>
+    </nav>
+  );
+}
+
+function Top({ mailbox }: { mailbox: boolean }) {
+  const t = useStore(shellMessages);
+  return (
+    <div className="mx-auto flex w-full max-w-[72rem] items-center gap-4 px-4 py-4 wide:px-8">
+      <Link to={paths.welcome} aria-label={t.welcome} className="mr-auto flex min-h-11 items-center gap-2 text-ink no-underline">
+        <Mark />
+        <span className="font-serif text-[1.375rem] leading-none font-bold tracking-tight">Tankmark</span>
+      </Link>
+      {mailbox && (
+        <Link to={paths.mailbox} className="inline-flex min-h-11 items-center">
+          {t.mailbox}
+        </Link>
+      )}
+      <ButtonLink to={paths.signIn}>{t.signIn}</ButtonLink>
+    </div>
+  );
+}
+
+/** What stands round every page: the way through the product, a bar below on phones and a rail on wide screens. */
+export function Frame() {
+  const t = useStore(shellMessages);
+  const session = useSession();
+  const busy = useNavigation().state !== 'idle';
+  const me = session?.me ?? null;
+  const mailbox = session?.mailbox ?? false;
+  return (
+    <div className={me ? 'min-h-screen pb-20 wide:flex wide:pb-0' : 'min-h-screen'}>
+      <a href="#content" className="sr-only focus:not-sr-only focus:absolute focus:z-30 focus:bg-sheet focus:p-3">
+        {t.skip}
+      </a>
+      {busy && <div aria-hidden="true" className="fixed inset-x-0 top-0 z-30 h-1 animate-pulse bg-dye" />}
+      {me ? <Rail me={me} mailbox={mailbox} /> : <Top mailbox={mailbox} />}
+      <main
+        id="content"
+        tabIndex={-1}
+        data-quiet-focus=""
+        aria-busy={busy}
+        className={`w-full min-w-0 px-4 py-4 wide:px-9 wide:py-7 ${me ? 'max-w-[76rem]' : 'mx-auto max-w-[72rem]'}`}
+      >
+        <Outlet />
+      </main>
+      <ScrollRestoration />
+    </div>
+  );
+}
