@@ -1,0 +1,111 @@
+import type { PlanArrow, PlanDimension, PlanFigure, PlanShape, Point } from '../../shared/contracts/figure.ts';
+import { DrawingFrame, drawingWidth, textWidth } from './frame.tsx';
+import { groundFill, isHatched, useHatching } from './grounds.tsx';
+import { dimensionGap, outward, planLayout, type PlanLayout } from './plan-layout.ts';
+
+/** Text on a plate of the paper's own color, kept inside the drawing. */
+function Plate({ at, text, bold = false }: { at: Point; text: string; bold?: boolean }) {
+  const width = textWidth(text);
+  const x = Math.min(Math.max(at[0], width / 2 + 1), drawingWidth - width / 2 - 1);
+  return (
+    <g>
+      <rect x={x - width / 2} y={at[1] - 10} width={width} height="20" rx="2" className="fill-sheet" opacity=".92" />
+      <text x={x} y={at[1] + 5} textAnchor="middle" fontWeight={bold ? 600 : 400}>
+        {text}
+      </text>
+    </g>
+  );
+}
+
+function middle(shape: PlanShape<string>): Point {
+  if (shape.form === 'rect') return [shape.x + shape.width / 2, shape.y + shape.height / 2];
+  if (shape.form === 'circle') return [shape.x, shape.y];
+  if (shape.nameAt) return shape.nameAt;
+  const n = shape.points.length || 1;
+  return [
+    shape.points.reduce((sum, [x]) => sum + x, 0) / n,
+    shape.points.reduce((sum, [, y]) => sum + y, 0) / n,
+  ];
+}
+
+function Outline({ shape, layout, className, fill }: { shape: PlanShape<string>; layout: PlanLayout; className: string; fill?: string }) {
+  const look = { className, fill, strokeWidth: 1.6, strokeLinejoin: 'round' as const };
+  if (shape.form === 'circle') {
+    const [cx, cy] = layout.at([shape.x, shape.y]);
+    return <circle cx={cx} cy={cy} r={shape.radius * layout.scale} {...look} />;
+  }
+  if (shape.form === 'polygon') {
+    return <polygon points={shape.points.map((point) => layout.at(point).join(',')).join(' ')} {...look} />;
+  }
+  const [x, y] = layout.at([shape.x, shape.y]);
+  return <rect x={x} y={y} width={shape.width * layout.scale} height={shape.height * layout.scale} {...look} />;
+}
+
+/** Room for a name in a shape, in the drawing's units. */
+function roomFor(shape: PlanShape<string>, layout: PlanLayout): number {
+  if (shape.form === 'rect') return Math.min(shape.width * layout.scale, (shape.height * layout.scale) / 0.02);
+  if (shape.form === 'circle') return shape.radius * 2 * layout.scale;
+  const xs = shape.points.map(([x]) => x);
+  return (Math.max(...xs) - Math.min(...xs)) * layout.scale;
+}
+
+function Dimension({ dimension, layout }: { dimension: PlanDimension<string>; layout: PlanLayout }) {
+  const [nx, ny] = outward(dimension);
+  const gap = dimension.place === 'outside' ? dimensionGap : 0;
+  const shift = ([x, y]: Point): Point => [x + nx * gap, y + ny * gap];
+  const from = shift(layout.at(dimension.from));
+  const to = shift(layout.at(dimension.to));
+  const tick = ([x, y]: Point) => `M${x - nx * 5} ${y - ny * 5}L${x + nx * 5} ${y + ny * 5}`;
+  const line = `M${from.join(' ')}L${to.join(' ')}`;
+  const center: Point = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
+  // Beside an upright line the text stands clear of it; on a level one it sits on the line.
+  const upright = Math.abs(nx) > 0.5 && dimension.place === 'outside';
+  const at: Point = upright ? [center[0] + Math.sign(nx) * (textWidth(dimension.text) / 2 + 6), center[1]] : center;
+  const fits = Math.hypot(to[0] - from[0], to[1] - from[1]) > textWidth(dimension.text) + 14;
+  const beside: Point = upright || fits ? at : [at[0] + nx * 14, at[1] + (ny === 0 ? -14 : ny * 14)];
+  return (
+    <g>
+      <path d={`${line}${tick(from)}${tick(to)}`} className="stroke-ink" fill="none" strokeDasharray={dimension.dashed ? '5 4' : undefined} />
+      <Plate at={beside} text={dimension.text} />
+    </g>
+  );
+}
+
+function Arrow({ arrow, layout }: { arrow: PlanArrow<string>; layout: PlanLayout }) {
+  const from = layout.at(arrow.from);
+  const to = layout.at(arrow.to);
+  const angle = (Math.atan2(to[1] - from[1], to[0] - from[0]) * 180) / Math.PI;
+  return (
+    <g>
+      <path d={`M${from.join(' ')}L${to.join(' ')}`} className="stroke-dye" strokeWidth="2" fill="none" />
+      <path d="M-11 -6L0 0L-11 6z" className="fill-dye" transform={`translate(${to.join(' ')}) rotate(${angle})`} />
+      {arrow.text !== undefined && <Plate at={[(from[0] + to[0]) / 2, (from[1] + to[1]) / 2 - 14]} text={arrow.text} />}
+    </g>
+  );
+}
+
+/** A plan drawn to scale, with dimension lines. */
+export function PlanDrawing({ figure }: { figure: PlanFigure }) {
+  const layout = planLayout(figure);
+  const hatching = useHatching();
+  return (
+    <DrawingFrame height={layout.height} alt={figure.alt}>
+      {hatching.defs}
+      {figure.shapes.map((shape, index) => (
+        <g key={index}>
+          <Outline shape={shape} layout={layout} className={groundFill[shape.ground]} />
+          <Outline shape={shape} layout={layout} className="stroke-ink" fill={isHatched(shape.ground) ? hatching.url(shape.ground) : 'none'} />
+        </g>
+      ))}
+      {figure.shapes.map((shape, index) =>
+        shape.name !== undefined && roomFor(shape, layout) >= textWidth(shape.name) ? (
+          <Plate key={index} at={layout.at(middle(shape))} text={shape.name} bold />
+        ) : null,
+      )}
+      {figure.arrows?.map((arrow, index) => <Arrow key={index} arrow={arrow} layout={layout} />)}
+      {figure.dimensions.map((dimension, index) => (
+        <Dimension key={index} dimension={dimension} layout={layout} />
+      ))}
+    </DrawingFrame>
+  );
+}
