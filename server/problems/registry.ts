@@ -7,6 +7,7 @@ import { areaTriangleFamily } from './families/area/area-triangle.ts';
 import { rateLabelBaseFamily } from './families/rate/rate-label-base.ts';
 import { ratePer1000Family } from './families/rate/rate-per-1000.ts';
 import { ratePerAcreFamily } from './families/rate/rate-per-acre.ts';
+import { spotPerGallonFamily } from './families/spot/spot-per-gallon.ts';
 import { unitToolFamily } from './families/units/unit-tool.ts';
 import { unitVolumeFamily } from './families/units/unit-volume.ts';
 
@@ -23,6 +24,7 @@ const current: readonly Family<unknown>[] = [
   ratePer1000Family,
   rateLabelBaseFamily,
   ratePerAcreFamily,
+  spotPerGallonFamily,
 ];
 const old: readonly Family<unknown>[] = [];
 
