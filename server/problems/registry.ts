@@ -8,6 +8,8 @@ import { rateLabelBaseFamily } from './families/rate/rate-label-base.ts';
 import { ratePer1000Family } from './families/rate/rate-per-1000.ts';
 import { ratePerAcreFamily } from './families/rate/rate-per-acre.ts';
 import { spotPerGallonFamily } from './families/spot/spot-per-gallon.ts';
+import { spotWaterTestFamily } from './families/spot/spot-water-test.ts';
+import { strengthPercentVolumeFamily } from './families/strength/strength-percent-volume.ts';
 import { unitToolFamily } from './families/units/unit-tool.ts';
 import { unitVolumeFamily } from './families/units/unit-volume.ts';
 
@@ -25,6 +27,8 @@ const current: readonly Family<unknown>[] = [
   rateLabelBaseFamily,
   ratePerAcreFamily,
   spotPerGallonFamily,
+  spotWaterTestFamily,
+  strengthPercentVolumeFamily,
 ];
 const old: readonly Family<unknown>[] = [];
 

@@ -1,7 +1,7 @@
 import type { Quantity } from '../../../../shared/quantity/quantity.ts';
 import type { Text } from '../../../../shared/vocabulary.ts';
 import { en, es, firstUse } from '../../say.ts';
-import { capital, type Scene, type Situation } from '../../situations.ts';
+import type { Scene, Situation } from '../../situations.ts';
 import { both } from '../both.ts';
 import { productName, targetOf, type MixLine } from './mix-lines.ts';
 
