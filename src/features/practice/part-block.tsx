@@ -1,0 +1,134 @@
+import { useStore } from '@nanostores/react';
+import { useEffect, useRef, useState, type FormEvent } from 'react';
+import type { PartView, Response } from '../../../shared/contracts/practice.ts';
+import { practiceMessages } from '../../i18n/practice.ts';
+import { ApiError } from '../../lib/api.ts';
+import { Button } from '../../ui/button.tsx';
+import { VerdictPanel } from '../../ui/verdict.tsx';
+import { ChoiceField } from './choice-field.tsx';
+import { useDraft } from './draft.ts';
+import { NumberField } from './number-field.tsx';
+import { OrderField } from './order-field.tsx';
+import { useAnswer } from './queries.ts';
+
+/** Seconds since the part came in front of the person, or since the last answer to it. */
+function useSeconds(): () => number {
+  const since = useRef(Date.now());
+  return () => {
+    const seconds = Math.round((Date.now() - since.current) / 1000);
+    since.current = Date.now();
+    return Math.min(Math.max(seconds, 0), 3_600);
+  };
+}
+
+function responseFor(part: PartView, value: string, unit: string): Response {
+  if (part.kind === 'choice') return { kind: 'choice', option: value };
+  if (part.kind === 'order') return { kind: 'order', steps: value === '' ? part.steps.map((step) => step.key) : value.split(' ') };
+  return { kind: 'number', text: value, ...(part.kind === 'number' ? { unit } : {}) };
+}
+
+interface PartBlockProps {
+  problemId: string;
+  part: PartView;
+  /** Several parts are lettered; a single one is not. */
+  lettered: boolean;
+}
+
+/** One part: what is asked, the field, and what grading said of each answer. */
+export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
+  const t = useStore(practiceMessages);
+  const units = part.kind === 'number' ? part.units : [];
+  const [value, keep, forget] = useDraft(`${problemId}.${part.key}`, '');
+  const [unit, keepUnit] = useDraft(`${problemId}.${part.key}.unit`, units[0]?.key ?? '');
+  const [waiting, setWaiting] = useState(false);
+  const [refused, setRefused] = useState<string | null>(null);
+  const seconds = useSeconds();
+  const answer = useAnswer(problemId, setWaiting);
+  const verdict = useRef<HTMLDivElement>(null);
+  const attempts = part.attempts.length;
+  const shown = useRef(attempts);
+  const closed = part.state === 'closed';
+
+  useEffect(() => {
+    if (attempts > shown.current) verdict.current?.focus();
+    shown.current = attempts;
+  }, [attempts]);
+
+  const check = (event: FormEvent) => {
+    event.preventDefault();
+    if (answer.isPending || closed) return;
+    setRefused(null);
+    answer.mutate(
+      { part: part.key, response: responseFor(part, value, unit), seconds: seconds() },
+      {
+        onSuccess: (reply) => {
+          if (reply.unreadable) setRefused(reply.unreadable.message);
+          else if (reply.problem.parts.find((one) => one.key === part.key)?.state === 'closed') forget();
+        },
+        onError: (error) => setRefused(error instanceof ApiError && error.status !== 0 ? error.message : t.couldNotSave),
+      },
+    );
+  };
+  const change = (next: string) => {
+    keep(next);
+    setRefused(null);
+  };
+  const button = closed ? null : (
+    <Button type="submit" disabled={answer.isPending}>
+      {answer.isPending ? t.checking : t.check({ part: part.key })}
+    </Button>
+  );
+  return (
+    <form onSubmit={check} noValidate className="border-t border-rule py-4 first:border-t-0">
+      <p id={`ask-${problemId}-${part.key}`} className="flex gap-2.5 font-semibold">
+        {lettered && <span>{t.part({ part: part.key })}</span>}
+        <span>{part.ask}</span>
+      </p>
+      {(part.kind === 'number' || part.kind === 'count') && !closed && (
+        <NumberField
+          part={part.key}
+          value={value}
+          onChange={change}
+          units={units}
+          unit={unit}
+          onUnit={keepUnit}
+          {...(part.kind === 'count' ? { thing: part.thing } : {})}
+          error={refused}
+          disabled={answer.isPending}
+        >
+          {button}
+        </NumberField>
+      )}
+      {part.kind === 'choice' && (
+        <ChoiceField part={part} value={value || (part.attempts.at(-1)?.typed ?? '')} onChange={change} disabled={answer.isPending || closed} />
+      )}
+      {part.kind === 'order' && (
+        <OrderField part={part} keys={closed ? [] : value.split(' ')} onChange={(keys) => change(keys.join(' '))} disabled={answer.isPending || closed} />
+      )}
+      {(part.kind === 'choice' || part.kind === 'order') && (
+        <>
+          {button}
+          {refused !== null && (
+            <p role="alert" className="mt-1.5 font-semibold text-clay">
+              {refused}
+            </p>
+          )}
+        </>
+      )}
+      {waiting && (
+        <p role="status" className="mt-2 text-sm text-brass">
+          {t.notSaved}
+        </p>
+      )}
+      <div aria-live="polite">
+        {part.attempts.map((attempt, index) => (
+          <VerdictPanel key={index} attempt={attempt} ref={index === attempts - 1 ? verdict : undefined} />
+        ))}
+      </div>
+      {attempts === 1 && !closed && <p className="mt-1.5 text-sm text-ink-soft">{t.firstCounts}</p>}
+      {closed && part.answerText !== null && part.attempts.at(-1)?.verdict !== 'right' && (
+        <p className="mt-2">{t.answer({ answer: part.answerText })}</p>
+      )}
+    </form>
+  );
+}

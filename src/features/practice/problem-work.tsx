@@ -1,0 +1,93 @@
+import { useStore } from '@nanostores/react';
+import { useQuery } from '@tanstack/react-query';
+import { lazy, Suspense, type ReactNode } from 'react';
+import type { ProblemView } from '../../../shared/contracts/practice.ts';
+import { ProblemFigure } from '../../figures/problem-figure.tsx';
+import { practiceMessages } from '../../i18n/practice.ts';
+import { shellMessages } from '../../i18n/shell.ts';
+import { LabelPanel } from '../../ui/label-panel.tsx';
+import { Loading } from '../../ui/loading.tsx';
+import { Notice } from '../../ui/notice.tsx';
+import { Sheet } from '../../ui/sheet.tsx';
+import { GiveUp } from './give-up.tsx';
+import { Hints } from './hints.tsx';
+import { LabelOnPhone } from './label-beside.tsx';
+import { PartBlock } from './part-block.tsx';
+import { problemQuery } from './queries.ts';
+
+// Formulas need their own style sheet and fonts: fetched only once a solution is shown.
+const WorkingLines = lazy(async () => ({ default: (await import('./working-lines.tsx')).WorkingLines }));
+
+function Solution({ lines }: { lines: NonNullable<ProblemView['working']> }) {
+  const t = useStore(practiceMessages);
+  return (
+    <section className="border-t border-rule pt-4">
+      <h2 className="mb-2">{t.solution}</h2>
+      <Suspense fallback={<Loading />}>
+        <WorkingLines lines={lines} />
+      </Suspense>
+    </section>
+  );
+}
+
+function Worksheet({ problem, compact, after }: { problem: ProblemView; compact: boolean; after?: ReactNode }) {
+  const t = useStore(practiceMessages);
+  const current = problem.parts.find((part) => part.state === 'open');
+  return (
+    <Sheet graduated>
+      <p className="mb-2 max-w-[38rem] font-serif text-[1.1rem] leading-normal">{problem.statement}</p>
+      {problem.figure && <ProblemFigure figure={problem.figure} describe={t.describe} />}
+      {problem.label && !compact && <LabelOnPhone label={problem.label} />}
+      {problem.label && compact && (
+        <div className="mb-4 max-w-md">
+          <LabelPanel label={problem.label} />
+        </div>
+      )}
+      {problem.parts.map((part) => (
+        <PartBlock key={part.key} problemId={problem.id} part={part} lettered={problem.parts.length > 1} />
+      ))}
+      {current && (
+        <div className="flex flex-wrap items-center gap-x-6 gap-y-1 border-t border-rule pt-2">
+          <Hints problemId={problem.id} part={current} />
+          <GiveUp problemId={problem.id} />
+        </div>
+      )}
+      {problem.working && <Solution lines={problem.working} />}
+      {problem.state === 'done' && after}
+    </Sheet>
+  );
+}
+
+/**
+ * A problem being worked: statement, drawing, parts, label and the standing caution.
+ * `compact` is for a checkpoint inside a lesson; `after` stands at the foot once all parts are closed.
+ */
+export function ProblemWork({ problemId, compact = false, after }: { problemId: string; compact?: boolean; after?: ReactNode }) {
+  const shell = useStore(shellMessages);
+  const { data: problem, error } = useQuery(problemQuery(problemId));
+  if (error) return <Notice tone="error">{error.message}</Notice>;
+  if (!problem) return <Loading />;
+  const beside = !compact && problem.label !== null;
+  return (
+    <div className={beside ? 'grid gap-6 wide:grid-cols-[minmax(0,1fr)_20rem]' : ''}>
+      <Worksheet problem={problem} compact={compact} after={after} />
+      {!compact && (
+        <aside className={beside ? '' : 'mt-4'}>
+          {problem.label && (
+            <div className="mb-4 hidden wide:sticky wide:top-6 wide:block">
+              <LabelPanel label={problem.label} />
+              <Notice tone="caution" className="mt-4 text-sm">
+                {shell.caution}
+              </Notice>
+            </div>
+          )}
+          <div className={problem.label ? 'wide:hidden' : ''}>
+            <Notice tone="caution" className="text-sm">
+              {shell.caution}
+            </Notice>
+          </div>
+        </aside>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,27 @@
+export const es = {
+  morning: 'Buenos días, {name}.',
+  afternoon: 'Buenas tardes, {name}.',
+  evening: 'Buenas noches, {name}.',
+  openTitle: 'Siga donde se quedó',
+  openDrill: 'Un ejercicio de {topics}: {done} de {length} hechos',
+  goOn: 'Seguir',
+  lessonTitle: 'Lección: {title}',
+  suggestTitle: 'Un ejercicio para hoy',
+  suggestText: 'Cinco problemas, unos diez minutos, de {topics}.',
+  suggestWhyNew: 'Todavía no los ha trabajado.',
+  suggestWhyLow: 'Son sus temas más bajos.',
+  start: 'Empezar el ejercicio',
+  chooseOwn: 'Elegir los temas',
+  firstTitle: 'Empiece aquí',
+  firstText:
+    'Lea una lección corta sobre medir el terreno y haga cinco problemas. Después de tres respuestas, el tubo del tema muestra dónde está.',
+  firstLesson: 'Leer la primera lección',
+  topicsTitle: 'Sus temas',
+  topicsHelp:
+    'La línea roja es la marca: 8 de 10 problemas comunes bien. La banda clara es el rango en que probablemente está.',
+  level: '{fill} de 100, entre {low} y {high}',
+  answers: { one: '{count} respuesta', other: '{count} respuestas' },
+  none: 'sin respuestas',
+  noProblems: 'problemas por venir',
+  and: '{first} y {last}',
+};
