@@ -32,14 +32,22 @@ export function formatNumber(
 
 const denominators = new Set([1n, 2n, 3n, 4n, 8n, 16n]);
 
-/** The number as a fraction people measure ("2 1/2", "3/4"); a decimal when none fits exactly. */
-export function formatMeasure(value: Rational, options: { maxDenominator?: number } = {}): string {
-  const most = BigInt(options.maxDenominator ?? 16);
-  if (value.compare(0) < 0 || !denominators.has(value.d) || value.d > most) return formatNumber(value);
-  const whole = value.n / value.d;
+/** The number as a fraction people measure ("2 1/2", "3/4"); null when none fits exactly. */
+function measured(value: Rational, maxDenominator: number): string | null {
+  if (!denominators.has(value.d) || value.d > BigInt(maxDenominator)) return null;
+  const sign = value.compare(0) < 0 ? '−' : '';
+  const whole = withCommas(String(value.n / value.d));
   const rest = value.n % value.d;
-  if (rest === 0n) return withCommas(String(whole));
-  return whole === 0n ? `${rest}/${value.d}` : `${withCommas(String(whole))} ${rest}/${value.d}`;
+  if (rest === 0n) return sign + whole;
+  return value.n < value.d ? `${sign}${rest}/${value.d}` : `${sign}${whole} ${rest}/${value.d}`;
+}
+
+/**
+ * The number as a fraction people measure ("2 1/2", "3/4"): halves, thirds, quarters, eighths, sixteenths. A decimal when
+ * none fits exactly.
+ */
+export function formatMeasure(value: Rational, options: { maxDenominator?: number } = {}): string {
+  return measured(value, options.maxDenominator ?? 16) ?? formatNumber(value);
 }
 
 function isMany(value: Rational | undefined): boolean {
@@ -48,7 +56,10 @@ function isMany(value: Rational | undefined): boolean {
 }
 
 /** The unit as written after a number: "sq ft", "Tbsp", "gal per acre"; empty for plain counts. */
-export function unitSymbol(unit: UnitKey, options: { locale?: Locale | undefined; value?: Rational | undefined } = {}): string {
+export function unitSymbol(
+  unit: UnitKey,
+  options: { locale?: Locale | undefined; value?: Rational | undefined } = {},
+): string {
   return unitName({ unit, locale: options.locale ?? 'en', form: 'symbol', many: isMany(options.value) });
 }
 
@@ -57,25 +68,31 @@ export function unitWord(unit: UnitKey, options: { locale: Locale; value?: Ratio
   return unitName({ unit, locale: options.locale, form: 'word', many: isMany(options.value) });
 }
 
+interface QuantityStyle {
+  style?: 'decimal' | 'fraction' | undefined;
+  places?: number | undefined;
+  maxPlaces?: number | undefined;
+  locale?: Locale | undefined;
+}
+
+/** "$13.40", "$12 per acre": whole dollars or cents, unless the caller says how many places. */
+function formatMoney(q: Quantity, options: QuantityStyle): string {
+  const free = options.places === undefined && options.maxPlaces === undefined;
+  const places = free ? (q.value.d === 1n ? 0 : 2) : options.places;
+  const number = formatNumber(q.value, { ...options, places });
+  const sign = number.startsWith('−') ? '−' : '';
+  return `${sign}$${number.slice(sign.length)}${unitSymbol(q.unit, { locale: options.locale }).replace('$', '')}`;
+}
+
 /** A quantity as people write it: "2.4 fl oz", "2 1/2 Tbsp", "1,600 sq ft", "2%", "$13.40", "1 acre". */
-export function formatQuantity(
-  q: Quantity,
-  options: {
-    style?: 'decimal' | 'fraction' | undefined;
-    places?: number | undefined;
-    maxPlaces?: number | undefined;
-    locale?: Locale | undefined;
-  } = {},
-): string {
-  const locale = options.locale ?? 'en';
-  const decimal = { places: options.places, maxPlaces: options.maxPlaces, locale };
-  const number = options.style === 'fraction' ? formatMeasure(q.value) : formatNumber(q.value, decimal);
-  if (q.unit === 'usd' || q.unit.startsWith('usd/')) {
-    const cents = options.places === undefined && options.maxPlaces === undefined ? formatNumber(q.value, { places: q.value.d === 1n ? 0 : 2 }) : number;
-    const rest = unitName({ unit: q.unit, locale, form: 'symbol', many: true }).replace('$', '');
-    return `$${cents}${rest}`;
-  }
+export function formatQuantity(q: Quantity, options: QuantityStyle = {}): string {
+  if (q.unit === 'usd' || q.unit.startsWith('usd/')) return formatMoney(q, options);
+  const { locale } = options;
+  const fraction = options.style === 'fraction' ? measured(q.value, 16) : null;
+  const number = fraction ?? formatNumber(q.value, options);
   if (q.unit === 'percent' || q.unit === 'deg') return `${number}${unitSymbol(q.unit, { locale })}`;
-  const symbol = unitSymbol(q.unit, { locale, value: q.value });
+  // The number that is read decides between one and many: 1.00001 shown as 1 is "1 acre".
+  const shown = fraction === null && /^−?1(\.0+)?$/.test(number) ? one : q.value;
+  const symbol = unitSymbol(q.unit, { locale, value: shown });
   return symbol === '' ? number : `${number} ${symbol}`;
 }

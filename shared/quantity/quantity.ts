@@ -1,5 +1,5 @@
 import { rational, type Rational } from './rational.ts';
-import { units, type UnitKey } from './units.ts';
+import { units, type Unit, type UnitKey } from './units.ts';
 
 /** An exact value with its unit. */
 export interface Quantity {
@@ -12,12 +12,24 @@ export function quantity(value: number | string | bigint | Rational, unit: UnitK
   return { value: rational(value), unit };
 }
 
+const factors = new Map<UnitKey, Map<UnitKey, Rational>>();
+
+/** What one `from` is in `to`, both without offset; worked out once for each pair. */
+function factorBetween(from: Unit, to: Unit): Rational {
+  let row = factors.get(from.key);
+  if (!row) factors.set(from.key, (row = new Map()));
+  let factor = row.get(to.key);
+  if (!factor) row.set(to.key, (factor = from.toBase.div(to.toBase)));
+  return factor;
+}
+
 /** The number after conversion to `unit`. @throws RangeError when the two measure different kinds of things */
 export function inUnit(q: Quantity, unit: UnitKey): Rational {
   if (q.unit === unit) return q.value;
   const from = units[q.unit];
   const to = units[unit];
   if (from.kind !== to.kind) throw new RangeError(`cannot convert ${from.kind} (${q.unit}) to ${to.kind} (${unit})`);
+  if (!from.offset && !to.offset) return q.value.mul(factorBetween(from, to));
   let value = q.value.mul(from.toBase);
   if (from.offset) value = value.add(from.offset);
   if (to.offset) value = value.sub(to.offset);

@@ -98,7 +98,7 @@ const simpleEs: Record<SimpleKey, Name> = {
   g: same('g', 'gramo', 'gramos'),
   kg: same('kg', 'kilogramo', 'kilogramos'),
   ton: plural('tonelada', 'toneladas', 'tonelada corta', 'toneladas cortas'),
-  mph: same('mph', 'milla por hora', 'millas por hora'),
+  mph: same('mi/h', 'milla por hora', 'millas por hora'),
   psi: same('psi', 'libra por pulgada cuadrada', 'libras por pulgada cuadrada'),
   kpa: same('kPa', 'kilopascal', 'kilopascales'),
   bar: same('bar', 'bar', 'bares'),
@@ -136,7 +136,12 @@ function isSimple(key: string): key is SimpleKey {
 }
 
 /** A unit's name in a language: `symbol` as written after a number, `word` written out; `many` chooses the plural. */
-export function unitName(options: { unit: UnitKey; locale: 'en' | 'es'; form: 'symbol' | 'word'; many: boolean }): string {
+export function unitName(options: {
+  unit: UnitKey;
+  locale: 'en' | 'es';
+  form: 'symbol' | 'word';
+  many: boolean;
+}): string {
   const { unit, locale, form, many } = options;
   const pick = (name: Name) => name[form][many ? 1 : 0];
   if (isSimple(unit)) return pick(simple[locale][unit]);
