@@ -3,7 +3,8 @@ import { Link } from 'react-router';
 
 type Look = 'main' | 'quiet' | 'plain' | 'danger';
 
-const shape = 'inline-flex min-h-11 items-center justify-center gap-2 rounded-[3px] px-[1.1rem] py-2 font-bold no-underline disabled:opacity-60 disabled:cursor-default';
+const shape =
+  'inline-flex min-h-11 items-center justify-center gap-2 rounded-[3px] px-[1.1rem] py-2 font-bold no-underline disabled:opacity-60 disabled:cursor-default';
 const looks: Record<Look, string> = {
   main: 'bg-dye text-on-dye hover:bg-dye-deep',
   quiet: 'border-[1.5px] border-dye text-dye-deep bg-transparent hover:bg-dye-wash',

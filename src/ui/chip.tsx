@@ -10,5 +10,9 @@ const tones = {
 export type ChipTone = keyof typeof tones;
 
 export function Chip({ tone, children }: { tone: ChipTone; children: ReactNode }) {
-  return <span className={`inline-block rounded-[2px] px-1.5 text-[0.8125rem] font-semibold ${tones[tone]}`}>{children}</span>;
+  return (
+    <span className={`inline-block rounded-[2px] px-1.5 text-[0.8125rem] font-semibold ${tones[tone]}`}>
+      {children}
+    </span>
+  );
 }

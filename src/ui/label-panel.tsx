@@ -3,7 +3,10 @@ import type { LabelView } from '../../shared/contracts/label.ts';
 /** A practice label: a black-ruled panel that says it is not real. */
 export function LabelPanel({ label }: { label: LabelView }) {
   return (
-    <section aria-label={`${label.name}. ${label.notice}`} className="border-2 border-ink bg-sheet text-sm leading-snug">
+    <section
+      aria-label={`${label.name}. ${label.notice}`}
+      className="border-2 border-ink bg-sheet text-sm leading-snug"
+    >
       <p className="bg-ink px-3 py-1 text-xs font-bold tracking-wide text-sheet">{label.notice}</p>
       <header className="flex flex-wrap items-baseline justify-between gap-x-3 border-b-2 border-ink px-3 py-2">
         <p className="font-serif text-xl leading-none font-bold">{label.name}</p>

@@ -8,7 +8,15 @@ const tones = {
 } as const;
 
 /** A remark beside the work. An error is announced at once. */
-export function Notice({ tone, children, className = '' }: { tone: keyof typeof tones; children: ReactNode; className?: string }) {
+export function Notice({
+  tone,
+  children,
+  className = '',
+}: {
+  tone: keyof typeof tones;
+  children: ReactNode;
+  className?: string;
+}) {
   return (
     <div role={tone === 'error' ? 'alert' : undefined} className={`border-l-[3px] pl-3 ${tones[tone]} ${className}`}>
       {children}

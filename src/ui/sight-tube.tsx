@@ -31,12 +31,23 @@ export function SightTube({ level }: { level: Pick<LevelView, 'state' | 'fill' |
       <rect x="6" y="2" width="20" height="92" rx="9" className="fill-sheet stroke-ink" strokeWidth="1.5" />
       <g clipPath={`url(#${clip})`}>
         {level.range && (
-          <rect x="7" y={yOf(level.range.high)} width="18" height={height * (level.range.high - level.range.low)} className={liquids[level.state]} opacity=".22" />
+          <rect
+            x="7"
+            y={yOf(level.range.high)}
+            width="18"
+            height={height * (level.range.high - level.range.low)}
+            className={liquids[level.state]}
+            opacity=".22"
+          />
         )}
         {y !== null && <path d={`M7 ${y}q9 4 18 0V94H7z`} className={liquids[level.state]} opacity=".88" />}
       </g>
       {Array.from({ length: 11 }, (_, index) => (
-        <path key={index} d={`M${index % 5 ? 33 : 30} ${top + (height * index) / 10}h${index % 5 ? 5 : 8}`} className="stroke-rule-strong" />
+        <path
+          key={index}
+          d={`M${index % 5 ? 33 : 30} ${top + (height * index) / 10}h${index % 5 ? 5 : 8}`}
+          className="stroke-rule-strong"
+        />
       ))}
       <path d={`M3 ${yOf(0.8)}h26`} className="stroke-clay" strokeWidth="1.6" />
     </svg>

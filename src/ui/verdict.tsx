@@ -22,9 +22,22 @@ export function VerdictPanel({ attempt, ref }: { attempt: AttemptView; ref?: Ref
   const look = looks[kind];
   const word = kind === 'slip' ? (attempt.slip === null ? t.notYet : t.slip) : t[kind];
   return (
-    <div ref={ref} tabIndex={-1} data-quiet-focus="" className={`mt-2.5 max-w-[44rem] border-l-4 px-3 py-2.5 ${look.box}`}>
+    <div
+      ref={ref}
+      tabIndex={-1}
+      data-quiet-focus=""
+      className={`mt-2.5 max-w-[44rem] border-l-4 px-3 py-2.5 ${look.box}`}
+    >
       <p className={`flex items-center gap-1.5 text-sm font-bold ${look.sign}`}>
-        <svg width="18" height="18" viewBox="0 0 18 18" aria-hidden="true" fill="none" stroke="currentColor" strokeWidth="2.2">
+        <svg
+          width="18"
+          height="18"
+          viewBox="0 0 18 18"
+          aria-hidden="true"
+          fill="none"
+          stroke="currentColor"
+          strokeWidth="2.2"
+        >
           <path d={look.path} />
         </svg>
         {word}

@@ -35,7 +35,9 @@ export function NumberField(props: NumberFieldProps) {
   return (
     <div className="mt-2">
       <div className="flex flex-wrap items-stretch gap-x-3 gap-y-2">
-        <div className={`inline-flex overflow-hidden rounded-[3px] border-[1.5px] bg-sheet focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-dye ${error ? 'border-clay' : 'border-ink'}`}>
+        <div
+          className={`inline-flex overflow-hidden rounded-[3px] border-[1.5px] bg-sheet focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-dye ${error ? 'border-clay' : 'border-ink'}`}
+        >
           <input
             ref={input}
             id={id}

@@ -14,14 +14,27 @@ export function orderedSteps(part: OrderView, keys: readonly string[]): OrderVie
 
 function Arrow({ down }: { down: boolean }) {
   return (
-    <svg width="18" height="18" viewBox="0 0 18 18" aria-hidden="true" fill="none" stroke="currentColor" strokeWidth="2">
+    <svg
+      width="18"
+      height="18"
+      viewBox="0 0 18 18"
+      aria-hidden="true"
+      fill="none"
+      stroke="currentColor"
+      strokeWidth="2"
+    >
       <path d={down ? 'M9 3v12M4 10l5 5 5-5' : 'M9 15V3M4 8l5-5 5 5'} />
     </svg>
   );
 }
 
 /** Putting steps in order: two buttons a step, so that it works by keyboard, by touch and by voice alike. */
-export function OrderField(props: { part: OrderView; keys: readonly string[]; onChange: (keys: string[]) => void; disabled: boolean }) {
+export function OrderField(props: {
+  part: OrderView;
+  keys: readonly string[];
+  onChange: (keys: string[]) => void;
+  disabled: boolean;
+}) {
   const t = useStore(practiceMessages);
   const [said, setSaid] = useState('');
   const list = useRef<HTMLOListElement>(null);
@@ -44,15 +57,31 @@ export function OrderField(props: { part: OrderView; keys: readonly string[]; on
       <p className="mb-2 text-sm text-ink-soft">{t.order}</p>
       <ol ref={list} className="list-none">
         {steps.map((step, index) => (
-          <li key={step.key} data-step={step.key} className="mb-1.5 flex items-center gap-3 border-[1.5px] border-rule-strong bg-sheet py-1.5 pr-1.5 pl-3">
+          <li
+            key={step.key}
+            data-step={step.key}
+            className="mb-1.5 flex items-center gap-3 border-[1.5px] border-rule-strong bg-sheet py-1.5 pr-1.5 pl-3"
+          >
             <span className="w-5 flex-none text-right font-bold text-ink-soft tabular-nums">{index + 1}</span>
             <span className="mr-auto">{step.text}</span>
             {!disabled && (
               <span className="flex flex-none gap-1">
-                <button type="button" aria-label={t.moveUp({ step: step.text })} disabled={index === 0} onClick={() => move(index, -1)} className="grid size-11 place-items-center rounded-[3px] border border-rule-strong text-dye disabled:opacity-40">
+                <button
+                  type="button"
+                  aria-label={t.moveUp({ step: step.text })}
+                  disabled={index === 0}
+                  onClick={() => move(index, -1)}
+                  className="grid size-11 place-items-center rounded-[3px] border border-rule-strong text-dye disabled:opacity-40"
+                >
                   <Arrow down={false} />
                 </button>
-                <button type="button" aria-label={t.moveDown({ step: step.text })} disabled={index === steps.length - 1} onClick={() => move(index, 1)} className="grid size-11 place-items-center rounded-[3px] border border-rule-strong text-dye disabled:opacity-40">
+                <button
+                  type="button"
+                  aria-label={t.moveDown({ step: step.text })}
+                  disabled={index === steps.length - 1}
+                  onClick={() => move(index, 1)}
+                  className="grid size-11 place-items-center rounded-[3px] border border-rule-strong text-dye disabled:opacity-40"
+                >
                   <Arrow down />
                 </button>
               </span>

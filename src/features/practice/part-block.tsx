@@ -23,7 +23,8 @@ function useSeconds(): () => number {
 
 function responseFor(part: PartView, value: string, unit: string): Response {
   if (part.kind === 'choice') return { kind: 'choice', option: value };
-  if (part.kind === 'order') return { kind: 'order', steps: value === '' ? part.steps.map((step) => step.key) : value.split(' ') };
+  if (part.kind === 'order')
+    return { kind: 'order', steps: value === '' ? part.steps.map((step) => step.key) : value.split(' ') };
   return { kind: 'number', text: value, ...(part.kind === 'number' ? { unit } : {}) };
 }
 
@@ -65,7 +66,8 @@ export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
           if (reply.unreadable) setRefused(reply.unreadable.message);
           else if (reply.problem.parts.find((one) => one.key === part.key)?.state === 'closed') forget();
         },
-        onError: (error) => setRefused(error instanceof ApiError && error.status !== 0 ? error.message : t.couldNotSave),
+        onError: (error) =>
+          setRefused(error instanceof ApiError && error.status !== 0 ? error.message : t.couldNotSave),
       },
     );
   };
@@ -100,10 +102,20 @@ export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
         </NumberField>
       )}
       {part.kind === 'choice' && (
-        <ChoiceField part={part} value={value || (part.attempts.at(-1)?.typed ?? '')} onChange={change} disabled={answer.isPending || closed} />
+        <ChoiceField
+          part={part}
+          value={value || (part.attempts.at(-1)?.typed ?? '')}
+          onChange={change}
+          disabled={answer.isPending || closed}
+        />
       )}
       {part.kind === 'order' && (
-        <OrderField part={part} keys={closed ? [] : value.split(' ')} onChange={(keys) => change(keys.join(' '))} disabled={answer.isPending || closed} />
+        <OrderField
+          part={part}
+          keys={closed ? [] : value.split(' ')}
+          onChange={(keys) => change(keys.join(' '))}
+          disabled={answer.isPending || closed}
+        />
       )}
       {(part.kind === 'choice' || part.kind === 'order') && (
         <>

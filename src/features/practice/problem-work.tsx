@@ -62,7 +62,15 @@ function Worksheet({ problem, compact, after }: { problem: ProblemView; compact:
  * A problem being worked: statement, drawing, parts, label and the standing caution.
  * `compact` is for a checkpoint inside a lesson; `after` stands at the foot once all parts are closed.
  */
-export function ProblemWork({ problemId, compact = false, after }: { problemId: string; compact?: boolean; after?: ReactNode }) {
+export function ProblemWork({
+  problemId,
+  compact = false,
+  after,
+}: {
+  problemId: string;
+  compact?: boolean;
+  after?: ReactNode;
+}) {
   const shell = useStore(shellMessages);
   const { data: problem, error } = useQuery(problemQuery(problemId));
   if (error) return <Notice tone="error">{error.message}</Notice>;

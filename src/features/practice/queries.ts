@@ -16,8 +16,14 @@ export const problemQuery = (id: string) =>
   queryOptions({ queryKey: ['problem', id], queryFn: () => api<ProblemView>('GET', `/api/problems/${id}`) });
 export const drillQuery = (id: string) =>
   queryOptions({ queryKey: ['drill', id], queryFn: () => api<DrillView>('GET', `/api/drills/${id}`) });
-export const drillsQuery = queryOptions({ queryKey: ['drills'], queryFn: () => api<DrillView[]>('GET', '/api/drills') });
-export const levelsQuery = queryOptions({ queryKey: ['levels'], queryFn: () => api<LevelView[]>('GET', '/api/levels') });
+export const drillsQuery = queryOptions({
+  queryKey: ['drills'],
+  queryFn: () => api<DrillView[]>('GET', '/api/drills'),
+});
+export const levelsQuery = queryOptions({
+  queryKey: ['levels'],
+  queryFn: () => api<LevelView[]>('GET', '/api/levels'),
+});
 export const progressQuery = queryOptions({
   queryKey: ['progress'],
   queryFn: () => api<ProgressView>('GET', '/api/progress'),

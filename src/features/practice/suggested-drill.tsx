@@ -8,7 +8,15 @@ import { useNewDrill } from './queries.ts';
 import { suggestDrill } from './suggest.ts';
 
 /** A drill on the topics that need it most, one press away. */
-export function SuggestedDrill({ levels, chooseAt, onMade }: { levels: readonly LevelView[]; chooseAt: string; onMade: (drillId: string) => void }) {
+export function SuggestedDrill({
+  levels,
+  chooseAt,
+  onMade,
+}: {
+  levels: readonly LevelView[];
+  chooseAt: string;
+  onMade: (drillId: string) => void;
+}) {
   const t = useStore(todayMessages);
   const names = useStore(topicMessages);
   const make = useNewDrill();

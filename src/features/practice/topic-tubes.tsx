@@ -18,7 +18,8 @@ export function TopicTube({ level }: { level: LevelView }) {
     level.fill !== null && level.range !== null
       ? t.level({ fill: inHundred(level.fill), low: inHundred(level.range.low), high: inHundred(level.range.high) })
       : null;
-  const small = figure ?? (level.tiers.length === 0 ? t.noProblems : level.answers > 0 ? t.answers(level.answers) : t.none);
+  const small =
+    figure ?? (level.tiers.length === 0 ? t.noProblems : level.answers > 0 ? t.answers(level.answers) : t.none);
   return (
     <div className="flex items-end gap-2.5">
       <SightTube level={level} />

@@ -1,0 +1,51 @@
+import { useStore } from '@nanostores/react';
+import type { LevelView } from '../../../shared/contracts/practice.ts';
+import { progressMessages } from '../../i18n/progress.ts';
+import { levelMessages, topicMessages } from '../../i18n/words.ts';
+import { Chip } from '../../ui/chip.tsx';
+import { DataTable } from '../../ui/data-table.tsx';
+import { levelTones } from '../../ui/sight-tube.tsx';
+
+function inHundred(share: number): number {
+  return Math.round(share * 100);
+}
+
+/** Every topic's level with its likely range; blank where there are too few answers to say. */
+export function LevelTable({ levels }: { levels: readonly LevelView[] }) {
+  const t = useStore(progressMessages);
+  const topics = useStore(topicMessages);
+  const states = useStore(levelMessages);
+  return (
+    <DataTable
+      caption={t.levels}
+      rows={levels}
+      rowKey={(level) => level.topic}
+      columns={[
+        { key: 'topic', head: t.topic, cell: (level) => topics[level.topic] },
+        {
+          key: 'state',
+          head: t.state,
+          cell: (level) => <Chip tone={levelTones[level.state]}>{states[level.state]}</Chip>,
+        },
+        {
+          key: 'fill',
+          head: t.fill,
+          number: true,
+          cell: (level) => (level.fill === null ? '–' : inHundred(level.fill)),
+        },
+        {
+          key: 'range',
+          head: t.range,
+          number: true,
+          cell: (level) =>
+            level.range ? (
+              t.range2({ low: inHundred(level.range.low), high: inHundred(level.range.high) })
+            ) : (
+              <span className="text-ink-soft">{t.blank}</span>
+            ),
+        },
+        { key: 'answers', head: t.answers, number: true, cell: (level) => level.answers },
+      ]}
+    />
+  );
+}
