@@ -16,7 +16,7 @@ import { PartBlock } from './part-block.tsx';
 import { problemQuery } from './queries.ts';
 
 // Formulas need their own style sheet and fonts: fetched only once a solution is shown.
-const WorkingLines = lazy(async () => ({ default: (await import('./working-lines.tsx')).WorkingLines }));
+const WorkingLines = lazy(async () => ({ default: (await import('../../ui/working-lines.tsx')).WorkingLines }));
 
 function Solution({ lines }: { lines: NonNullable<ProblemView['working']> }) {
   const t = useStore(practiceMessages);

@@ -1,5 +1,5 @@
 import 'katex/dist/katex.min.css';
-import type { WorkingLineView } from '../../../shared/contracts/practice.ts';
+import type { WorkingLineView } from '../../shared/contracts/practice.ts';
 
 /** A worked solution: one line, one reason. The formulas come rendered from our own server. */
 export function WorkingLines({ lines }: { lines: readonly WorkingLineView[] }) {
