@@ -4,11 +4,16 @@ import { areaLShapeFamily } from './families/area/area-l-shape.ts';
 import { areaRectangleLessFamily } from './families/area/area-rectangle-less.ts';
 import { areaRectangleFamily } from './families/area/area-rectangle.ts';
 import { areaTriangleFamily } from './families/area/area-triangle.ts';
+import { boomGpaFamily } from './families/boom/boom-gpa.ts';
+import { boomSpeedFamily } from './families/boom/boom-speed.ts';
+import { hand128thFamily } from './families/handheld/hand-128th.ts';
+import { handTestPlotFamily } from './families/handheld/hand-test-plot.ts';
 import { rateLabelBaseFamily } from './families/rate/rate-label-base.ts';
 import { ratePer1000Family } from './families/rate/rate-per-1000.ts';
 import { ratePerAcreFamily } from './families/rate/rate-per-acre.ts';
 import { spotPerGallonFamily } from './families/spot/spot-per-gallon.ts';
 import { spotWaterTestFamily } from './families/spot/spot-water-test.ts';
+import { spreaderNeedFamily } from './families/spreader/spreader-need.ts';
 import { strengthPercentVolumeFamily } from './families/strength/strength-percent-volume.ts';
 import { unitToolFamily } from './families/units/unit-tool.ts';
 import { unitVolumeFamily } from './families/units/unit-volume.ts';
@@ -29,6 +34,11 @@ const current: readonly Family<unknown>[] = [
   spotPerGallonFamily,
   spotWaterTestFamily,
   strengthPercentVolumeFamily,
+  hand128thFamily,
+  handTestPlotFamily,
+  boomSpeedFamily,
+  boomGpaFamily,
+  spreaderNeedFamily,
 ];
 const old: readonly Family<unknown>[] = [];
 

@@ -58,7 +58,9 @@ function draw(rng: Rng, tier: Tier): Given | null {
   if (mix.compare('1.5') < 0 || mix.compare(16) > 0) return null;
   // The first tiers come out even, so that their rounding never matters.
   if (tier < 3 && mix.mul(4).d !== 1n && mix.mul(10).d !== 1n) return null;
-  return productNeeded(g, {}).value.compare(askedUnit(g) === 'tbsp' ? 24 : 60) > 0 ? null : g;
+  const product = productNeeded(g, {}).value;
+  if (askedUnit(g) === 'tbsp' && product.div(stepOf('tbsp')).d !== 1n) return null;
+  return product.compare(askedUnit(g) === 'tbsp' ? 24 : 60) > 0 ? null : g;
 }
 
 function parts(g: Given, earlier: Earlier): readonly NumberPart[] {

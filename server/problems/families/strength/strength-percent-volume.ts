@@ -9,6 +9,7 @@ import { given, grouped, number, over, plus, struck, times, type WorkingLine } f
 import { both } from '../both.ts';
 import { measuredOut } from '../rate/measure-out.ts';
 import { labelUse } from '../spot/mix-lines.ts';
+import { toWholeSteps } from '../to-whole-steps.ts';
 import { byThirtyMl, factorOver, toStep } from '../units/unit-steps.ts';
 import { percentHeading, percentLines } from './percent-lines.ts';
 import {
@@ -62,7 +63,8 @@ function parts(g: Given, earlier: Earlier): readonly NumberPart[] {
       'The cylinder is marked in milliliters (mL). How much is that, to the nearest 1 mL?',
       'La probeta está marcada en mililitros (mL). ¿Cuánto es, redondeado a 1 mL?',
     );
-    const alsoRight = byThirtyMl(answer, 'fl-oz');
+    const fromRounded = inMilliliters(g, { a: toWholeSteps(productForTank(g), tenth) });
+    const alsoRight = [...byThirtyMl(answer, 'fl-oz'), fromRounded, ...byThirtyMl(fromRounded, 'fl-oz')];
     return [full, { kind: 'number', key: 'b', topic: 'units', ask, answer, step: rational(1), units: ['ml', 'l'], alsoRight }];
   }
   const last = productPart({
