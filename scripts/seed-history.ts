@@ -9,10 +9,10 @@ import { roundedAnswer } from '../server/problems/answer-text.ts';
 import { generate, type Problem } from '../server/problems/engine.ts';
 import type { Part } from '../server/problems/family.ts';
 import type { Response } from '../server/problems/grade.ts';
-import { familyVersion } from '../server/problems/registry.ts';
+import { families, familyVersion } from '../server/problems/registry.ts';
 import { makeRng, type Rng } from '../server/problems/rng.ts';
 import { formatQuantity } from '../shared/quantity/format.ts';
-import type { Locale, Topic } from '../shared/vocabulary.ts';
+import { topics, type Locale, type Topic } from '../shared/vocabulary.ts';
 
 // Twelve weeks of believable work for the demonstration's trainees: invented people with different strengths, simulated
 // from a seed and worked through the product's own services, so that every figure shown follows from real records.
@@ -33,20 +33,7 @@ export interface HistoryPerson {
 
 const weeks = 12;
 const msPerDay = 86_400_000;
-const drillTopics: readonly Topic[] = [
-  'area',
-  'units',
-  'rate',
-  'spot',
-  'strength',
-  'handheld',
-  'boom',
-  'spreader',
-  'tank',
-  'nozzle',
-  'equipment',
-  'mixing',
-];
+const drillTopics = topics.filter((topic) => families.some((family) => family.topic === topic));
 const tierCost = { 1: -0.7, 2: 0, 3: 0.9 } as const;
 /** Logits gained over the twelve weeks. */
 const gain = 1.4;
@@ -135,9 +122,9 @@ async function workDay(options: {
   const practice = practiceService({ repo, zone, now, newId });
   const drills = drillService(drillRepo(database.db), practice);
   const worker = { id: person.id, language: person.language };
-  const topics = rng.sample(drillTopics, 2);
+  const chosen = rng.sample(drillTopics, 2);
   const tier = share < 0.25 ? 1 : rng.pick([1, 2, 2, 'rising'] as const);
-  const drill = await drills.create(worker, { topics, tier, length: 5 });
+  const drill = await drills.create(worker, { topics: chosen, tier, length: 5 });
   const problems = rng.chance(1, 8) ? 3 : 5;
   for (let place = 0; place < problems; place += 1) {
     const shown = await drills.next(worker, drill.id);

@@ -54,7 +54,7 @@ function password(home) {
 }
 
 async function initialize({ bin, files, ids, secret, fast }) {
-  if (!fast) say('Making the database cluster ...');
+  if (!fast) process.stderr.write('Making the database cluster ...\n');
   rmSync(files, { recursive: true, force: true });
   mkdirSync(files, { mode: 0o700 });
   const secretFile = `${files}.secret`;
