@@ -15,14 +15,24 @@ export function BoomDrawing({ figure }: { figure: BoomFigure }) {
   return (
     <DrawingFrame height={groundY + 14 + notes.length * 22} alt={figure.alt}>
       <path d={`M${first} 30H${second}M${first} 24V52M${second} 24V52`} className="stroke-ink" fill="none" />
-      <rect x={(first + second) / 2 - textWidth(figure.spacing) / 2} y="4" width={textWidth(figure.spacing)} height="19" className="fill-sheet" />
+      <rect
+        x={(first + second) / 2 - textWidth(figure.spacing) / 2}
+        y="4"
+        width={textWidth(figure.spacing)}
+        height="19"
+        className="fill-sheet"
+      />
       <text x={(first + second) / 2} y="19" textAnchor="middle">
         {figure.spacing}
       </text>
       <rect x="30" y={boomY - 6} width={drawingWidth - 60} height="9" rx="3" className="fill-rule-strong" />
       {xs.map((x) => (
         <g key={x}>
-          <path d={`M${x} ${boomY + 16}L${x - step * 0.62} ${groundY}H${x + step * 0.62}z`} className="fill-dye" opacity=".2" />
+          <path
+            d={`M${x} ${boomY + 16}L${x - step * 0.62} ${groundY}H${x + step * 0.62}z`}
+            className="fill-dye"
+            opacity=".2"
+          />
           <path d={`M${x - 6} ${boomY + 3}h12v8l-3 5h-6l-3-5z`} className="fill-sheet stroke-ink" strokeWidth="1.5" />
         </g>
       ))}

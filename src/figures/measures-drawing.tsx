@@ -40,7 +40,10 @@ export function MeasuresDrawing({ figure }: { figure: MeasuresFigure }) {
   return (
     <DrawingFrame height={rows * 160} alt={figure.alt}>
       {figure.tools.map(({ tool, name }, index) => (
-        <g key={name} transform={`translate(${width * ((index % columns) + 0.5)} ${160 * Math.floor(index / columns)})`}>
+        <g
+          key={name}
+          transform={`translate(${width * ((index % columns) + 0.5)} ${160 * Math.floor(index / columns)})`}
+        >
           <path d={`M${-width / 2 + 8} ${floor}H${width / 2 - 8}`} className="stroke-rule-strong" />
           <Shape tool={tool} />
           <text y="149" textAnchor="middle" fontSize="14">

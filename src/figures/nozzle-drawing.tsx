@@ -48,7 +48,13 @@ export function NozzleDrawing({ figure }: { figure: NozzlePatternFigure }) {
         return (
           <g key={name} transform={`translate(${x} ${y})`}>
             <path d="M-8 -16h16v10l-4 6h-8l-4-6z" className="fill-sheet stroke-ink" strokeWidth="1.5" />
-            <path d={sprays[pattern]} className={lines ? 'stroke-dye' : 'fill-dye'} fill={lines ? 'none' : undefined} strokeWidth="2.5" opacity=".35" />
+            <path
+              d={sprays[pattern]}
+              className={lines ? 'stroke-dye' : 'fill-dye'}
+              fill={lines ? 'none' : undefined}
+              strokeWidth="2.5"
+              opacity=".35"
+            />
             <g transform="translate(0 86)">
               <Footprint pattern={pattern} />
             </g>

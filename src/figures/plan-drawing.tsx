@@ -22,13 +22,20 @@ function middle(shape: PlanShape<string>): Point {
   if (shape.form === 'circle') return [shape.x, shape.y];
   if (shape.nameAt) return shape.nameAt;
   const n = shape.points.length || 1;
-  return [
-    shape.points.reduce((sum, [x]) => sum + x, 0) / n,
-    shape.points.reduce((sum, [, y]) => sum + y, 0) / n,
-  ];
+  return [shape.points.reduce((sum, [x]) => sum + x, 0) / n, shape.points.reduce((sum, [, y]) => sum + y, 0) / n];
 }
 
-function Outline({ shape, layout, className, fill }: { shape: PlanShape<string>; layout: PlanLayout; className: string; fill?: string }) {
+function Outline({
+  shape,
+  layout,
+  className,
+  fill,
+}: {
+  shape: PlanShape<string>;
+  layout: PlanLayout;
+  className: string;
+  fill?: string;
+}) {
   const look = { className, fill, strokeWidth: 1.6, strokeLinejoin: 'round' as const };
   if (shape.form === 'circle') {
     const [cx, cy] = layout.at([shape.x, shape.y]);
@@ -65,7 +72,12 @@ function Dimension({ dimension, layout }: { dimension: PlanDimension<string>; la
   const beside: Point = upright || fits ? at : [at[0] + nx * 14, at[1] + (ny === 0 ? -14 : ny * 14)];
   return (
     <g>
-      <path d={`${line}${tick(from)}${tick(to)}`} className="stroke-ink" fill="none" strokeDasharray={dimension.dashed ? '5 4' : undefined} />
+      <path
+        d={`${line}${tick(from)}${tick(to)}`}
+        className="stroke-ink"
+        fill="none"
+        strokeDasharray={dimension.dashed ? '5 4' : undefined}
+      />
       <Plate at={beside} text={dimension.text} />
     </g>
   );
@@ -94,7 +106,12 @@ export function PlanDrawing({ figure }: { figure: PlanFigure }) {
       {figure.shapes.map((shape, index) => (
         <g key={index}>
           <Outline shape={shape} layout={layout} className={groundFill[shape.ground]} />
-          <Outline shape={shape} layout={layout} className="stroke-ink" fill={isHatched(shape.ground) ? hatching.url(shape.ground) : 'none'} />
+          <Outline
+            shape={shape}
+            layout={layout}
+            className="stroke-ink"
+            fill={isHatched(shape.ground) ? hatching.url(shape.ground) : 'none'}
+          />
         </g>
       ))}
       {figure.shapes.map((shape, index) =>
@@ -102,7 +119,9 @@ export function PlanDrawing({ figure }: { figure: PlanFigure }) {
           <Plate key={index} at={layout.at(middle(shape))} text={shape.name} bold />
         ) : null,
       )}
-      {figure.arrows?.map((arrow, index) => <Arrow key={index} arrow={arrow} layout={layout} />)}
+      {figure.arrows?.map((arrow, index) => (
+        <Arrow key={index} arrow={arrow} layout={layout} />
+      ))}
       {figure.dimensions.map((dimension, index) => (
         <Dimension key={index} dimension={dimension} layout={layout} />
       ))}

@@ -13,7 +13,15 @@ export function TankDrawing({ figure }: { figure: TankFigure }) {
   return (
     <DrawingFrame height={bottom + 34} alt={figure.alt}>
       <rect x={left + 60} y={top - 18} width="60" height="18" className="fill-sheet stroke-ink" strokeWidth="1.6" />
-      <rect x={left} y={top} width={right - left} height={bottom - top} rx="10" className="fill-sheet stroke-ink" strokeWidth="1.8" />
+      <rect
+        x={left}
+        y={top}
+        width={right - left}
+        height={bottom - top}
+        rx="10"
+        className="fill-sheet stroke-ink"
+        strokeWidth="1.8"
+      />
       {level > 0 && (
         <path
           d={`M${left + 1} ${y}q${(right - left) / 2} 7 ${right - left - 2} 0V${bottom - 9}a9 9 0 0 1 -9 9H${left + 10}a9 9 0 0 1 -9 -9z`}
@@ -23,7 +31,14 @@ export function TankDrawing({ figure }: { figure: TankFigure }) {
       )}
       {Array.from({ length: 9 }, (_, index) => {
         const mark = bottom - ((bottom - top) * (index + 1)) / 10;
-        return <path key={mark} d={`M${right} ${mark}h${index % 5 === 4 ? -22 : -12}`} className="stroke-ink" strokeWidth="1.3" />;
+        return (
+          <path
+            key={mark}
+            d={`M${right} ${mark}h${index % 5 === 4 ? -22 : -12}`}
+            className="stroke-ink"
+            strokeWidth="1.3"
+          />
+        );
       })}
       <text x={(left + right) / 2} y={bottom + 22} textAnchor="middle" fontWeight="600">
         {figure.capacity}

@@ -25,7 +25,11 @@ function Rail({ me, mailbox }: { me: MeView; mailbox: boolean }) {
       aria-label={t.main}
       className="fixed inset-x-0 bottom-0 z-20 border-t border-rule bg-sheet pb-[env(safe-area-inset-bottom)] wide:sticky wide:top-0 wide:flex wide:h-screen wide:w-[13.5rem] wide:flex-none wide:flex-col wide:border-t-0 wide:border-r wide:bg-transparent wide:py-6 wide:pr-4 wide:pl-6"
     >
-      <Link to={paths.welcome} aria-label={t.welcome} className="mb-6 hidden items-end gap-2 text-ink no-underline wide:flex">
+      <Link
+        to={paths.welcome}
+        aria-label={t.welcome}
+        className="mb-6 hidden items-end gap-2 text-ink no-underline wide:flex"
+      >
         <Mark />
         <span className="font-serif text-[1.375rem] leading-none font-bold tracking-tight">Tankmark</span>
       </Link>
@@ -54,7 +58,11 @@ function Top({ mailbox }: { mailbox: boolean }) {
   const t = useStore(shellMessages);
   return (
     <div className="mx-auto flex w-full max-w-[72rem] items-center gap-4 px-4 py-4 wide:px-8">
-      <Link to={paths.welcome} aria-label={t.welcome} className="mr-auto flex min-h-11 items-center gap-2 text-ink no-underline">
+      <Link
+        to={paths.welcome}
+        aria-label={t.welcome}
+        className="mr-auto flex min-h-11 items-center gap-2 text-ink no-underline"
+      >
         <Mark />
         <span className="font-serif text-[1.375rem] leading-none font-bold tracking-tight">Tankmark</span>
       </Link>

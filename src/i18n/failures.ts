@@ -1,0 +1,33 @@
+import { i18n } from './i18n.ts';
+
+/** What a person reads when the server refuses or cannot be reached, by the failure's code. */
+export const failureMessages = i18n('failures', {
+  unreachable: 'The server cannot be reached. Check your connection, then try again.',
+  'bad-request': 'The request could not be understood. Load the page anew, then try again.',
+  'bad-json': 'The request could not be understood. Load the page anew, then try again.',
+  'bad-body': 'Something in the form is not as expected. Look at the fields, then try again.',
+  'bad-query': 'The address of this page is not as expected.',
+  'body-too-large': 'That is more than can be sent at once.',
+  'media-type': 'The request could not be understood. Load the page anew, then try again.',
+  'not-signed-in': 'You are no longer signed in. Sign in again; what you typed stays here.',
+  'foreign-origin': 'The request did not come from this site. Load the page anew, then try again.',
+  'role-missing': 'Your account does not have the role this needs.',
+  'seat-missing': 'This part opens with a seat. Ask your company or school for one.',
+  'account-locked': 'This account is locked. Ask the office of your school.',
+  'address-unconfirmed': 'Confirm your e-mail address first. We have written to you again.',
+  'sign-in-wrong': 'The address or the password is not right.',
+  'password-wrong': 'The password is not right.',
+  'token-invalid': 'This link was used already, or it is too old.',
+  'not-found': 'There is nothing at this address.',
+  'too-many-requests': 'That was too often in a short time. Wait a little, then try again.',
+  'lesson-unfinished': 'Answer the checkpoints of the lesson first.',
+  'key-reused': 'This answer crossed with another one. Load the page anew, then try again.',
+  'part-closed': 'This part is closed. Load the page anew to see its answer.',
+  'out-of-turn': 'Hints are shown one after the other. Load the page anew, then try again.',
+  'drill-done': 'This drill has no more problems.',
+  'nothing-to-drill': 'There are no problems for this choice yet. Choose another topic or tier.',
+  busy: 'Too much is going on at once. Try again in a moment.',
+  'mailbox-unreachable': 'The mailbox does not answer. Try again in a moment.',
+  'mail-failed': 'The message could not be sent. Try again in a few minutes.',
+  internal: 'Something went wrong on our side. Try again; if it stays so, tell us.',
+});
