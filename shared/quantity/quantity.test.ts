@@ -30,7 +30,11 @@ describe('convert', () => {
     ['0', 'c', 'f', '32'],
   ] as const)('%s %s in %s is %s', (value, from, to, expected) => {
     const [top, bottom] = expected.split('/') as [string, string | undefined];
-    expect(inUnit(quantity(value, from), to).toFraction()).toBe(rational(top).div(bottom ?? '1').toFraction());
+    expect(inUnit(quantity(value, from), to).toFraction()).toBe(
+      rational(top)
+        .div(bottom ?? '1')
+        .toFraction(),
+    );
   });
 
   it('goes there and back exactly, for every pair of units of a kind', () => {

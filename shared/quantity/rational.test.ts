@@ -38,10 +38,15 @@ describe('rational', () => {
   it('reads every number as its own decimal text says', () => {
     fc.assert(
       fc.property(fc.double({ noNaN: true, noDefaultInfinity: true }), (value) => {
-        expect(rational(value).valueOf()).toBeCloseTo(value, 10);
-        const [digits, exponent] = String(value).split('e');
-        if (exponent === undefined) expect(rational(value).equals(rational(digits as string))).toBe(true);
+        const [digits = '', exponent = '0'] = String(value).split('e');
+        const [whole = '', decimals = ''] = digits.split('.');
+        const power = Number(exponent) - decimals.length;
+        const factor = rational(10n ** BigInt(Math.abs(power)));
+        const top = rational(BigInt(whole + decimals));
+        const expected = power < 0 ? top.div(factor) : top.mul(factor);
+        expect(rational(value).equals(expected)).toBe(true);
       }),
+      { numRuns: 1000 },
     );
   });
 });
