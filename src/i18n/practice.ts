@@ -14,6 +14,7 @@ export const practiceMessages = i18n('practice', {
   unit: params('Unit for part ({part})'),
   keys: 'Signs that phone keypads lack',
   check: params('Check ({part})'),
+  checkOne: 'Check',
   checking: 'Checking …',
   notSaved: 'Not saved yet. Trying again …',
   couldNotSave: 'The server cannot be reached. Your answer is kept here: press Check again when you are connected.',

@@ -16,8 +16,6 @@ export const signInMessages = i18n('sign-in', {
   passwordMissing: 'Enter your password.',
   show: 'Show the password',
   language: 'Language',
-  english: 'English',
-  spanish: 'Español',
   create: 'Create the account',
   haveOne: 'Already have an account?',
   signInTitle: 'Sign in',

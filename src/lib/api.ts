@@ -32,10 +32,12 @@ type Method = 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
  * @throws ApiError
  */
 export async function api<T>(method: Method, path: string, body?: unknown): Promise<T> {
-  const init: RequestInit = { method, credentials: 'same-origin', headers: { accept: 'application/json' } };
+  // The page's language goes along: the browser's own may differ from the one a visitor chose.
+  const headers = { accept: 'application/json', 'accept-language': document.documentElement.lang || 'en' };
+  const init: RequestInit = { method, credentials: 'same-origin', headers };
   if (body !== undefined) {
     init.body = JSON.stringify(body);
-    init.headers = { accept: 'application/json', 'content-type': 'application/json' };
+    init.headers = { ...headers, 'content-type': 'application/json' };
   }
   let response: Response;
   try {

@@ -1,6 +1,7 @@
 import { useStore } from '@nanostores/react';
 import { Link, NavLink, Outlet, ScrollRestoration, useNavigation } from 'react-router';
 import type { MeView } from '../../shared/contracts/account.ts';
+import { chooseLocale, languageNames, useLocale } from '../i18n/i18n.ts';
 import { shellMessages } from '../i18n/shell.ts';
 import { mayDo, useSession } from '../lib/session.ts';
 import { paths } from '../paths.ts';
@@ -54,6 +55,21 @@ function Rail({ me, mailbox }: { me: MeView; mailbox: boolean }) {
   );
 }
 
+/** The other language, named in its own words. */
+function OtherLanguage() {
+  const other = useLocale() === 'en' ? 'es' : 'en';
+  return (
+    <button
+      type="button"
+      lang={other}
+      onClick={() => chooseLocale(other)}
+      className="min-h-11 text-dye underline underline-offset-[.18em]"
+    >
+      {languageNames[other]}
+    </button>
+  );
+}
+
 function Top({ mailbox }: { mailbox: boolean }) {
   const t = useStore(shellMessages);
   return (
@@ -71,6 +87,7 @@ function Top({ mailbox }: { mailbox: boolean }) {
           {t.mailbox}
         </Link>
       )}
+      <OtherLanguage />
       <ButtonLink to={paths.signIn}>{t.signIn}</ButtonLink>
     </div>
   );

@@ -12,6 +12,11 @@ const looks: Record<Look, string> = {
   danger: 'border-[1.5px] border-clay text-clay bg-transparent hover:bg-clay-wash',
 };
 
+/** The look of a button, for what is a link to a file. */
+export function buttonLook(look: Look): string {
+  return `${shape} ${looks[look]}`;
+}
+
 export function Button({ look = 'main', className = '', ...rest }: ComponentProps<'button'> & { look?: Look }) {
   return <button type="button" {...rest} className={`${shape} ${looks[look]} ${className}`} />;
 }

@@ -2,7 +2,8 @@ import { zodResolver } from '@hookform/resolvers/zod';
 import { useStore } from '@nanostores/react';
 import { useForm } from 'react-hook-form';
 import { passwordLength, signUpBodySchema, type SignUpBody } from '../../../shared/contracts/auth.ts';
-import { useLocale } from '../../i18n/i18n.ts';
+import { locales } from '../../../shared/vocabulary.ts';
+import { languageNames, useLocale } from '../../i18n/i18n.ts';
 import { signInMessages } from '../../i18n/sign-in.ts';
 import { Button } from '../../ui/button.tsx';
 import { Failure } from '../../ui/failure.tsx';
@@ -43,8 +44,11 @@ export function SignUpForm({ onDone }: { onDone: (email: string) => void }) {
         show={t.show}
       />
       <SelectField {...form.register('language')} label={t.language}>
-        <option value="en">{t.english}</option>
-        <option value="es">{t.spanish}</option>
+        {locales.map((one) => (
+          <option key={one} value={one}>
+            {languageNames[one]}
+          </option>
+        ))}
       </SelectField>
       <Failure error={signUp.error} className="" />
       <Button type="submit" disabled={signUp.isPending} className="justify-self-start">

@@ -11,6 +11,7 @@ export const es = {
   unit: 'Unidad de la parte ({part})',
   keys: 'Signos que faltan en el teclado del teléfono',
   check: 'Revisar ({part})',
+  checkOne: 'Revisar',
   checking: 'Revisando …',
   notSaved: 'Todavía no se guardó. Intentando otra vez …',
   couldNotSave: 'No hay conexión con el servidor. Su respuesta queda aquí: pulse Revisar cuando tenga conexión.',

@@ -13,8 +13,6 @@ export const es = {
   passwordMissing: 'Escriba su contraseña.',
   show: 'Mostrar la contraseña',
   language: 'Idioma',
-  english: 'English',
-  spanish: 'Español',
   create: 'Crear la cuenta',
   haveOne: '¿Ya tiene una cuenta?',
   signInTitle: 'Entrar',

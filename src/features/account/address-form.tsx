@@ -1,0 +1,36 @@
+import { zodResolver } from '@hookform/resolvers/zod';
+import { useStore } from '@nanostores/react';
+import { useForm } from 'react-hook-form';
+import { changeEmailBodySchema } from '../../../shared/contracts/auth.ts';
+import { accountMessages } from '../../i18n/account.ts';
+import { Button } from '../../ui/button.tsx';
+import { Failure } from '../../ui/failure.tsx';
+import { Field } from '../../ui/field.tsx';
+import { Notice } from '../../ui/notice.tsx';
+import { useChangeAddress } from './queries.ts';
+
+/** Asks for another address; it changes once both have confirmed. */
+export function AddressForm({ email }: { email: string }) {
+  const t = useStore(accountMessages);
+  const change = useChangeAddress();
+  const form = useForm({ resolver: zodResolver(changeEmailBodySchema), defaultValues: { newEmail: '' } });
+  const submit = form.handleSubmit((body) => change.mutate(body.newEmail));
+  return (
+    <form onSubmit={(event) => void submit(event)} noValidate className="grid gap-4">
+      <p className="break-words">{t.addressNow({ email })}</p>
+      <Field
+        {...form.register('newEmail')}
+        type="email"
+        label={t.newAddress}
+        help={t.addressHelp}
+        error={form.formState.errors.newEmail && t.addressError}
+        autoComplete="email"
+      />
+      <Failure error={change.error} className="" />
+      <div role="status">{change.isSuccess && <Notice tone="good">{t.addressSent}</Notice>}</div>
+      <Button type="submit" look="quiet" disabled={change.isPending} className="justify-self-start">
+        {t.changeAddress}
+      </Button>
+    </form>
+  );
+}

@@ -1,0 +1,49 @@
+import { zodResolver } from '@hookform/resolvers/zod';
+import { useStore } from '@nanostores/react';
+import { useForm } from 'react-hook-form';
+import { changePasswordBodySchema, passwordLength } from '../../../shared/contracts/auth.ts';
+import { accountMessages } from '../../i18n/account.ts';
+import { Button } from '../../ui/button.tsx';
+import { Failure } from '../../ui/failure.tsx';
+import { Notice } from '../../ui/notice.tsx';
+import { PasswordField } from '../../ui/password-field.tsx';
+import { useChangePassword } from './queries.ts';
+
+export function PasswordForm() {
+  const t = useStore(accountMessages);
+  const change = useChangePassword();
+  const form = useForm({
+    resolver: zodResolver(changePasswordBodySchema),
+    defaultValues: { currentPassword: '', newPassword: '', revokeOtherSessions: true },
+  });
+  const { errors } = form.formState;
+  const submit = form.handleSubmit((body) => change.mutate(body, { onSuccess: () => form.reset() }));
+  return (
+    <form onSubmit={(event) => void submit(event)} noValidate className="grid gap-4">
+      <PasswordField
+        {...form.register('currentPassword')}
+        label={t.currentPassword}
+        error={errors.currentPassword && t.passwordMissing}
+        autoComplete="current-password"
+        show={t.show}
+      />
+      <PasswordField
+        {...form.register('newPassword')}
+        label={t.newPassword}
+        help={t.passwordHelp({ least: passwordLength.least })}
+        error={errors.newPassword && t.passwordError(passwordLength)}
+        autoComplete="new-password"
+        show={t.show}
+      />
+      <label className="inline-flex min-h-11 items-center gap-2.5">
+        <input type="checkbox" {...form.register('revokeOtherSessions')} className="size-5 accent-dye" />
+        {t.endOthers}
+      </label>
+      <Failure error={change.error} className="" />
+      <div role="status">{change.isSuccess && <Notice tone="good">{t.passwordChanged}</Notice>}</div>
+      <Button type="submit" look="quiet" disabled={change.isPending} className="justify-self-start">
+        {t.changePassword}
+      </Button>
+    </form>
+  );
+}
