@@ -15,6 +15,7 @@ import { spotPerGallonFamily } from './families/spot/spot-per-gallon.ts';
 import { spotWaterTestFamily } from './families/spot/spot-water-test.ts';
 import { spreaderNeedFamily } from './families/spreader/spreader-need.ts';
 import { strengthPercentVolumeFamily } from './families/strength/strength-percent-volume.ts';
+import { tankLoadsFamily } from './families/tank/tank-loads.ts';
 import { unitToolFamily } from './families/units/unit-tool.ts';
 import { unitVolumeFamily } from './families/units/unit-volume.ts';
 
@@ -39,6 +40,7 @@ const current: readonly Family<unknown>[] = [
   boomSpeedFamily,
   boomGpaFamily,
   spreaderNeedFamily,
+  tankLoadsFamily,
 ];
 const old: readonly Family<unknown>[] = [];
 

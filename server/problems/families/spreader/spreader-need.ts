@@ -4,8 +4,8 @@ import type { Text, Tier } from '../../../../shared/vocabulary.ts';
 import { defineFamily, type Earlier, type NumberPart, type Part } from '../../family.ts';
 import type { Rng } from '../../rng.ts';
 import { en, es } from '../../say.ts';
-import { drawScene, situationOf } from '../../situations.ts';
-import { about, given, number, over, struck, times, type WorkingLine } from '../../working.ts';
+import { drawScene, places, situationOf } from '../../situations.ts';
+import { given, number, over, struck, times, type WorkingLine } from '../../working.ts';
 import { areaUnits, oneSqFt } from '../area/plan-parts.ts';
 import { both } from '../both.ts';
 import { toTenth } from '../rate/measure-out.ts';
@@ -27,9 +27,13 @@ const ranges = {
 } as const;
 const areas = { bed: [6, 28], lawn: [25, 140], turf: [180, 400] } as const;
 
+/** Places that would have a sports field. */
+const placesWithField = places.filter(({ key }) => ['school', 'community-center', 'park-lodge', 'office-park'].includes(key));
+
 function draw(rng: Rng, tier: Tier): Given | null {
-  const scene = drawScene(rng, spreaderNeedSituations.length);
   const line = rng.pick(granuleLines);
+  const drawnScene = drawScene(rng, spreaderNeedSituations.length);
+  const scene = line.site === 'turf' ? { ...drawnScene, place: rng.pick(placesWithField) } : drawnScene;
   const bag = quantity(rng.pick([20, 25, 40, 50]), 'lb');
   if (tier === 1) {
     const [least, most] = areas[line.site];
@@ -120,9 +124,14 @@ function working(g: Given): readonly WorkingLine[] {
     ...area,
     product,
     {
-      name: both('bags', 'bolsas'),
+      name: both('bags in pounds', 'bolsas según las libras'),
       expression: over(struck(needed, 2), struck(g.bag)),
-      result: about(number(exact, 2), number(bags(g, {}).value)),
+      result: number(exact, 2),
+      reason: both('Pounds needed by pounds in a bag.', 'Libras que se necesitan entre libras por bolsa.'),
+    },
+    {
+      name: both('bags', 'bolsas'),
+      result: number(bags(g, {}).value),
       answers: true,
       reason: both(
         'Bags come whole, so round up. Close the open one and store it dry.',
