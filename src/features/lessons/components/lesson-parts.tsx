@@ -1,0 +1,25 @@
+import type { ComponentProps } from 'react';
+import { Link } from 'react-router';
+import { Checkpoint } from './checkpoint.tsx';
+
+/** Links inside the product stay in it; others open as links do. */
+function Anchor({ href = '', children, ...rest }: ComponentProps<'a'>) {
+  if (href.startsWith('/')) return <Link to={href}>{children}</Link>;
+  return (
+    <a href={href} {...rest}>
+      {children}
+    </a>
+  );
+}
+
+/** A wide table scrolls inside its own frame, never the page. */
+function Table(props: ComponentProps<'table'>) {
+  return (
+    <div className="my-5 overflow-x-auto" tabIndex={0} role="group">
+      <table {...props} />
+    </div>
+  );
+}
+
+/** Everything a lesson's text may use besides plain Markdown. */
+export const lessonParts = { a: Anchor, table: Table, Checkpoint };

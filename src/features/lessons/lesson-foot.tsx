@@ -1,0 +1,62 @@
+import { useStore } from '@nanostores/react';
+import { useEffect, useRef, useState } from 'react';
+import type { LessonSummary } from '../../../shared/contracts/lessons.ts';
+import { useFormat } from '../../i18n/i18n.ts';
+import { lessonMessages } from '../../i18n/lessons.ts';
+import { Chip } from '../../ui/chip.tsx';
+import { useSaveProgress } from './queries.ts';
+import type { LessonModule } from './lesson-text.ts';
+
+/** Marks the lesson as read: honestly, once its end was seen and every checkpoint is done. */
+export function LessonEnd({ lesson, done }: { lesson: LessonSummary; done: number }) {
+  const t = useStore(lessonMessages);
+  const end = useRef<HTMLDivElement>(null);
+  const [seen, setSeen] = useState(false);
+  const { mutate } = useSaveProgress(lesson.slug);
+  const isRead = lesson.progress?.state === 'read';
+  const left = lesson.checkpoints.length - done;
+  useEffect(() => {
+    if (!end.current) return undefined;
+    const watch = new IntersectionObserver((entries) => entries.some((entry) => entry.isIntersecting) && setSeen(true));
+    watch.observe(end.current);
+    return () => watch.disconnect();
+  }, []);
+  useEffect(() => {
+    if (seen && left <= 0 && !isRead) mutate({ position: 1, state: 'read' });
+  }, [seen, left, isRead, mutate]);
+  return (
+    <div ref={end} role="status" className="mt-8 border-t-2 border-ink pt-4">
+      {isRead ? (
+        <p>
+          <Chip tone="mark">{t.read}</Chip> {t.endRead}
+        </p>
+      ) : (
+        <p className="text-ink-soft">{left > 0 ? t.endUnfinished(left) : t.endReach}</p>
+      )}
+    </div>
+  );
+}
+
+/** Where a lesson's facts come from, and when it was last gone over. */
+export function LessonSources({ front }: { front: LessonModule['frontmatter'] }) {
+  const t = useStore(lessonMessages);
+  const { time } = useFormat();
+  const { sources = [], revised } = front;
+  return (
+    <section aria-label={t.sources} className="mt-6 text-sm text-ink-soft">
+      {sources.length > 0 && (
+        <>
+          <h2 className="font-sans text-sm font-semibold">{t.sources}</h2>
+          <ul className="mt-1 list-disc pl-5">
+            {sources.map(({ title, publisher, year, ref }) => (
+              <li key={title}>{[title, publisher, year ?? t.noYear, ref].filter(Boolean).join(', ')}</li>
+            ))}
+          </ul>
+        </>
+      )}
+      {revised !== undefined && (
+        <p className="mt-2">{t.revised({ date: time(new Date(revised), { dateStyle: 'long', timeZone: 'UTC' }) })}</p>
+      )}
+    </section>
+  );
+}
