@@ -39,4 +39,7 @@ export const lessonMessages = i18n('lessons', {
   checkpointOf: params('Checkpoint {number} of {count}'),
   openCheckpoint: 'Show the question',
   another: 'Try one with new numbers',
+  endReach: 'This lesson counts as read once you have come to its end.',
+  openTitle: 'Pick up your lesson',
+  openGoOn: 'Go on reading',
 });

@@ -28,10 +28,10 @@ export function LessonEnd({ lesson, done }: { lesson: LessonSummary; done: numbe
     <div ref={end} role="status" className="mt-8 border-t-2 border-ink pt-4">
       {isRead ? (
         <p>
-          <Chip tone="mark">{t.read}</Chip> {t.endRead}
+          <Chip tone="mark">{t.read}</Chip> {t.isRead}
         </p>
       ) : (
-        <p className="text-ink-soft">{left > 0 ? t.endUnfinished(left) : t.endReach}</p>
+        <p className="text-ink-soft">{left > 0 ? t.missing(left) : t.endReach}</p>
       )}
     </div>
   );
@@ -44,12 +44,10 @@ export function LessonSources({ front }: { front: LessonModule['frontmatter'] })
   const { sources = [], revised } = front;
   return (
     <section aria-label={t.sources} className="mt-6 text-sm text-ink-soft">
-      {sources.length > 0 && (
-        <>
-          <h2 className="font-sans text-sm font-semibold">{t.sources}</h2>
+      <h2 className="font-sans text-sm font-semibold">{t.sources}</h2>
           <ul className="mt-1 list-disc pl-5">
             {sources.map(({ title, publisher, year, ref }) => (
-              <li key={title}>{[title, publisher, year ?? t.noYear, ref].filter(Boolean).join(', ')}</li>
+              <li key={title}>{[title, publisher, year, ref].filter(Boolean).join(', ')}</li>
             ))}
           </ul>
         </>

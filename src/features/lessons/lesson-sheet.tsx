@@ -29,9 +29,8 @@ function GoOn({ position, textOf }: { position: number; textOf: () => HTMLElemen
   return (
     <Notice tone="plain" className="no-print mb-6 max-w-[40rem]">
       <p className="flex flex-wrap items-center gap-x-4">
-        {t.goOnTitle}
         <Button look="plain" onClick={go}>
-          {t.goOn}
+          {t.backToPlace}
         </Button>
       </p>
     </Notice>
@@ -77,7 +76,7 @@ export function LessonSheet({ lesson, found, renderCheckpoint }: LessonSheetProp
       )}
       {found.locale !== locale && (
         <Notice tone="plain" className="mb-6 max-w-[40rem]">
-          {t.inEnglish}
+          {t.englishOnly}
         </Notice>
       )}
       <LessonProvider value={context}>

@@ -13,9 +13,9 @@ export function OpenLesson(props: { lessons: readonly LessonSummary[]; linkTo: (
   return (
     <div className="mb-6 border-b border-rule pb-5">
       <h2>{t.openTitle}</h2>
-      <p className="mt-2 mb-3 font-serif">{t.openText({ title: open.title, minutes: t.minutes(open.minutes) })}</p>
+      <p className="mt-2 mb-3 font-serif">{`${open.title} · ${t.minutes(open.minutes)}`}</p>
       <ButtonLink look="quiet" to={props.linkTo(open)}>
-        {t.todayGoOn}
+        {t.openGoOn}
       </ButtonLink>
     </div>
   );

@@ -36,4 +36,7 @@ export const es = {
   checkpointOf: 'Punto de control {number} de {count}',
   openCheckpoint: 'Mostrar la pregunta',
   another: 'Probar otro con números nuevos',
+  endReach: 'Esta lección cuenta como leída cuando usted llega al final.',
+  openTitle: 'Siga con su lección',
+  openGoOn: 'Seguir leyendo',
 };
