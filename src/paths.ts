@@ -24,6 +24,8 @@ export const patterns = {
 export const paths = {
   ...patterns,
   lesson: (topic: string, slug: string) => `/course/${topic}/${slug}`,
+  /** The drill form with one topic already chosen. */
+  drillsOn: (topic: string) => `/drills?topic=${topic}`,
   drill: (drillId: string) => `/drills/${drillId}`,
   problem: (problemId: string) => `/problems/${problemId}`,
   family: (family: string) => `/staff/families/${family}`,

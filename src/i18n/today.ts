@@ -8,7 +8,6 @@ export const todayMessages = i18n('today', {
   openTitle: 'Pick up where you left off',
   openDrill: params('A drill on {topics}: {done} of {length} done'),
   goOn: 'Go on',
-  lessonTitle: params('Lesson: {title}'),
   suggestTitle: 'A drill for today',
   suggestText: params('Five problems, about ten minutes, on {topics}.'),
   suggestWhyNew: 'You have not worked these yet.',

@@ -45,13 +45,12 @@ export function LessonSources({ front }: { front: LessonModule['frontmatter'] })
   return (
     <section aria-label={t.sources} className="mt-6 text-sm text-ink-soft">
       <h2 className="font-sans text-sm font-semibold">{t.sources}</h2>
-          <ul className="mt-1 list-disc pl-5">
-            {sources.map(({ title, publisher, year, ref }) => (
-              <li key={title}>{[title, publisher, year, ref].filter(Boolean).join(', ')}</li>
-            ))}
-          </ul>
-        </>
-      )}
+      {sources.length === 0 && <p>{t.noSources}</p>}
+      <ul className="mt-1 list-disc pl-5">
+        {sources.map(({ title, publisher, year, ref }) => (
+          <li key={title}>{[title, publisher, year, ref].filter(Boolean).join(', ')}</li>
+        ))}
+      </ul>
       {revised !== undefined && (
         <p className="mt-2">{t.revised({ date: time(new Date(revised), { dateStyle: 'long', timeZone: 'UTC' }) })}</p>
       )}

@@ -29,12 +29,21 @@ function Choice(props: {
   );
 }
 
+interface DrillFormProps {
+  levels: readonly LevelView[];
+  /** Topics already chosen when one comes here from elsewhere. */
+  chosen: readonly string[];
+  onMade: (drillId: string) => void;
+}
+
 /** What a drill is made of: topics, tier and length. */
-export function DrillForm({ levels, onMade }: { levels: readonly LevelView[]; onMade: (drillId: string) => void }) {
+export function DrillForm({ levels, chosen, onMade }: DrillFormProps) {
   const t = useStore(drillMessages);
   const names = useStore(topicMessages);
   const make = useNewDrill();
-  const [topics, setTopics] = useState<Topic[]>([]);
+  const [topics, setTopics] = useState<Topic[]>(() =>
+    levels.filter(({ topic, tiers }) => tiers.length > 0 && chosen.includes(topic)).map(({ topic }) => topic),
+  );
   const [tier, setTier] = useState<NewDrillBody['tier']>('rising');
   const [length, setLength] = useState<NewDrillBody['length']>(10);
   const [missing, setMissing] = useState(false);

@@ -64,7 +64,7 @@ export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
       {
         onSuccess: (reply) => {
           if (reply.unreadable) setRefused(reply.unreadable.message);
-          else if (reply.problem.parts.find((one) => one.key === part.key)?.state === 'closed') forget();
+          else if (reply.parts.find((one) => one.key === part.key)?.state === 'closed') forget();
         },
         onError: (error) =>
           setRefused(error instanceof ApiError && error.status !== 0 ? error.message : t.couldNotSave),

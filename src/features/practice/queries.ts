@@ -30,8 +30,7 @@ export const progressQuery = queryOptions({
 });
 
 /** What an answer or a given-up problem makes out of date. */
-async function spoil(client: QueryClient, problem: ProblemView): Promise<void> {
-  client.setQueryData(problemQuery(problem.id).queryKey, problem);
+async function spoil(client: QueryClient, problem: Pick<ProblemView, 'drill'>): Promise<void> {
   const drill = problem.drill ? [client.invalidateQueries({ queryKey: ['drill', problem.drill.id] })] : [];
   await Promise.all([
     ...drill,
@@ -57,9 +56,15 @@ export function useAnswer(problemId: string, onWaiting: (waiting: boolean) => vo
       const path = `/api/problems/${problemId}/parts/${part}/answers`;
       return withRetries(() => api<AnswerReply>('POST', path, { key, response, seconds }), onWaiting);
     },
-    onSuccess: (reply) => {
-      if (reply.unreadable) return undefined;
-      return spoil(client, reply.problem);
+    onSuccess: async (reply) => {
+      if (reply.unreadable) return;
+      const { queryKey } = problemQuery(problemId);
+      const { parts, state } = reply;
+      client.setQueryData(queryKey, (before) => before && { ...before, parts, state });
+      const problem = client.getQueryData(queryKey);
+      // The worked solution is fetched once all is answered.
+      if (state === 'done') await client.invalidateQueries({ queryKey });
+      if (problem) await spoil(client, problem);
     },
   });
 }
@@ -77,7 +82,10 @@ export function useGiveUp(problemId: string) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: () => api<ProblemView>('POST', `/api/problems/${problemId}/solution`),
-    onSuccess: (problem) => spoil(client, problem),
+    onSuccess: (problem) => {
+      client.setQueryData(problemQuery(problemId).queryKey, problem);
+      return spoil(client, problem);
+    },
   });
 }
 

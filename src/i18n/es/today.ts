@@ -5,7 +5,6 @@ export const es = {
   openTitle: 'Siga donde se quedó',
   openDrill: 'Un ejercicio de {topics}: {done} de {length} hechos',
   goOn: 'Seguir',
-  lessonTitle: 'Lección: {title}',
   suggestTitle: 'Un ejercicio para hoy',
   suggestText: 'Cinco problemas, unos diez minutos, de {topics}.',
   suggestWhyNew: 'Todavía no los ha trabajado.',

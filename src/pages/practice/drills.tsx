@@ -1,6 +1,6 @@
 import { useStore } from '@nanostores/react';
 import { useQuery } from '@tanstack/react-query';
-import { useNavigate } from 'react-router';
+import { useNavigate, useSearchParams } from 'react-router';
 import { DrillForm } from '../../features/practice/drill-form.tsx';
 import { drillsQuery, levelsQuery } from '../../features/practice/queries.ts';
 import { RecentDrills } from '../../features/practice/recent-drills.tsx';
@@ -16,6 +16,7 @@ export default function Drills() {
   const t = useStore(drillMessages);
   const shell = useStore(shellMessages);
   const navigate = useNavigate();
+  const chosen = useSearchParams()[0].getAll('topic');
   const levels = useQuery(levelsQuery);
   const drills = useQuery(drillsQuery);
   const error = levels.error ?? drills.error;
@@ -27,7 +28,7 @@ export default function Drills() {
         <p className="mt-2 max-w-prose font-serif">{t.intro}</p>
       </PageHeading>
       <Sheet>
-        <DrillForm levels={levels.data} onMade={(id) => void navigate(paths.drill(id))} />
+        <DrillForm levels={levels.data} chosen={chosen} onMade={(id) => void navigate(paths.drill(id))} />
       </Sheet>
       <Notice tone="caution" className="mt-4 text-sm">
         {shell.caution}

@@ -1,6 +1,8 @@
 import { useStore } from '@nanostores/react';
 import { useQuery } from '@tanstack/react-query';
 import { useNavigate } from 'react-router';
+import { OpenLesson } from '../../features/lessons/open-lesson.tsx';
+import { lessonsQuery } from '../../features/lessons/queries.ts';
 import { OpenDrill } from '../../features/practice/open-drill.tsx';
 import { drillsQuery, levelsQuery } from '../../features/practice/queries.ts';
 import { SuggestedDrill } from '../../features/practice/suggested-drill.tsx';
@@ -32,19 +34,22 @@ export default function Today() {
   const navigate = useNavigate();
   const levels = useQuery(levelsQuery);
   const drills = useQuery(drillsQuery);
+  const lessons = useQuery(lessonsQuery).data ?? [];
   if (levels.error) return <Notice tone="error">{levels.error.message}</Notice>;
   if (!levels.data || !drills.data) return <Loading />;
+  const first = lessons.find((lesson) => lesson.topic === 'area') ?? lessons[0];
   const isNew = levels.data.every((level) => level.answers === 0);
   return (
     <>
       <PageHeading title={greeting} />
       <Sheet graduated>
         <OpenDrill drills={drills.data} linkTo={paths.drill} />
+        <OpenLesson lessons={lessons} linkTo={({ topic, slug }) => paths.lesson(topic, slug)} />
         {isNew && (
           <div className="mb-6 border-b border-rule pb-5">
             <h2>{t.firstTitle}</h2>
             <p className="mt-2 mb-3 max-w-[36rem] font-serif">{t.firstText}</p>
-            <ButtonLink look="quiet" to={paths.course}>
+            <ButtonLink look="quiet" to={first ? paths.lesson(first.topic, first.slug) : paths.course}>
               {t.firstLesson}
             </ButtonLink>
           </div>
