@@ -97,10 +97,14 @@ export function squared(item: Expression): Expression {
 
 const texSigns = { '×': ' \\times ', '+': ' + ', '−': ' - ', '÷': ' \\div ', '=': ' = ', '≈': ' \\approx ' } as const;
 
-function texText(text: string): string {
+/** Plain words as KaTeX source: signs that it reads as commands are escaped, raised figures set as powers. */
+export function texText(text: string): string {
   const escaped = text.replace(/[\\{}$&#^_~%]/g, (sign) => (sign === '\\' ? '\\textbackslash ' : `\\${sign}`));
   // Raised figures are no letters of KaTeX's text mode: "pies²".
-  return `\\text{${escaped.replaceAll('²', '}^{2}\\text{').replaceAll('³', '}^{3}\\text{')}}`.replaceAll('\\text{}', '');
+  return `\\text{${escaped.replaceAll('²', '}^{2}\\text{').replaceAll('³', '}^{3}\\text{')}}`.replaceAll(
+    '\\text{}',
+    '',
+  );
 }
 function texNumber(text: string): string {
   return text.replaceAll(',', '{,}').replaceAll('−', '-').replaceAll('$', '\\$').replaceAll('%', '\\%');

@@ -2,10 +2,10 @@ import katex from 'katex';
 import type { WorkingLineView } from '../../../shared/contracts/practice.ts';
 import type { Locale } from '../../../shared/vocabulary.ts';
 import type { Problem } from '../../problems/engine.ts';
-import { toPlain, toTex, type WorkingLine } from '../../problems/working.ts';
+import { texText, toPlain, toTex, type WorkingLine } from '../../problems/working.ts';
 
 function tex(line: WorkingLine, locale: Locale): string {
-  const chain = [`\\text{${line.name[locale].replaceAll(/[\\{}$&#^_~%]/g, (sign) => `\\${sign}`)}}`];
+  const chain = [texText(line.name[locale])];
   if (line.expression) chain.push(toTex(line.expression, locale));
   if (line.result) {
     const value = toTex(line.result, locale);
