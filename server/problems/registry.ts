@@ -6,8 +6,11 @@ import { areaRectangleFamily } from './families/area/area-rectangle.ts';
 import { areaTriangleFamily } from './families/area/area-triangle.ts';
 import { boomGpaFamily } from './families/boom/boom-gpa.ts';
 import { boomSpeedFamily } from './families/boom/boom-speed.ts';
+import { chooseEquipmentFamily } from './families/equipment/choose-equipment.ts';
 import { hand128thFamily } from './families/handheld/hand-128th.ts';
 import { handTestPlotFamily } from './families/handheld/hand-test-plot.ts';
+import { mixingOrderFamily } from './families/mixing/mixing-order.ts';
+import { nozzlePatternFamily } from './families/nozzle/nozzle-pattern.ts';
 import { rateLabelBaseFamily } from './families/rate/rate-label-base.ts';
 import { ratePer1000Family } from './families/rate/rate-per-1000.ts';
 import { ratePerAcreFamily } from './families/rate/rate-per-acre.ts';
@@ -41,6 +44,9 @@ const current: readonly Family<unknown>[] = [
   boomGpaFamily,
   spreaderNeedFamily,
   tankLoadsFamily,
+  nozzlePatternFamily,
+  chooseEquipmentFamily,
+  mixingOrderFamily,
 ];
 const old: readonly Family<unknown>[] = [];
 

@@ -27,7 +27,8 @@ export function travelSpeed({ test }: Given): Quantity {
   return test.as === 'whole-boom' ? speedOverCourse(test) : test.speed;
 }
 const flowUsed = (g: Given, earlier: Earlier) => (g.test.as !== 'flow' && earlier.a ? earlier.a : nozzleFlow(g));
-const speedUsed = (g: Given, earlier: Earlier) => (g.test.as === 'whole-boom' && earlier.b ? earlier.b : travelSpeed(g));
+const speedUsed = (g: Given, earlier: Earlier) =>
+  g.test.as === 'whole-boom' && earlier.b ? earlier.b : travelSpeed(g);
 export function rate(g: Given, earlier: Earlier): Quantity {
   return gallonsPerAcreFromFlow({ flow: flowUsed(g, earlier), speed: speedUsed(g, earlier), spacing: g.spacing });
 }

@@ -29,13 +29,23 @@ function drawTest(rng: Rng, tier: Tier, nozzles: number): Given['test'] {
   }
   const each = rng.step('0.15', '0.7', '0.05');
   const time = quantity(rng.int(23, 80), 's');
-  return { as: 'whole-boom', flow: quantity(each.mul(nozzles), 'gal/min'), course: quantity(rng.pick([200, 300]), 'ft'), time };
+  return {
+    as: 'whole-boom',
+    flow: quantity(each.mul(nozzles), 'gal/min'),
+    course: quantity(rng.pick([200, 300]), 'ft'),
+    time,
+  };
 }
 
 function draw(rng: Rng, tier: Tier): Given | null {
   const nozzles = rng.int(6, 14);
   const spacing = quantity(rng.pick(spacings), 'in');
-  const g: Given = { ...drawScene(rng, boomGpaSituations.length), nozzles, spacing, test: drawTest(rng, tier, nozzles) };
+  const g: Given = {
+    ...drawScene(rng, boomGpaSituations.length),
+    nozzles,
+    spacing,
+    test: drawTest(rng, tier, nozzles),
+  };
   const [flow, speed, perAcre] = [nozzleFlow(g).value, travelSpeed(g).value, rate(g, {}).value];
   if (flow.compare('0.1') < 0 || flow.compare('0.8') > 0) return null;
   if (speed.compare('2.5') < 0 || speed.compare(6) > 0) return null;
@@ -88,7 +98,11 @@ function parts(g: Given, earlier: Earlier): readonly NumberPart[] {
     step: tenth,
     units: ['gal/acre', 'gal/1000-sq-ft'],
     // Whoever rounds the flow or the speed as asked goes on with the rounded figure.
-    alsoRight: [rate(g, { a: roundedFlow }), rate(g, { a: roundedFlow, b: roundedSpeed }), rate(g, { b: roundedSpeed })],
+    alsoRight: [
+      rate(g, { a: roundedFlow }),
+      rate(g, { a: roundedFlow, b: roundedSpeed }),
+      rate(g, { b: roundedSpeed }),
+    ],
   };
   if (g.test.as === 'flow') return [gallons];
   return g.test.as === 'catch' ? [flowPart(g), gallons] : [flowPart(g), speedPart(g), gallons];
@@ -110,7 +124,10 @@ function firstLines(g: Given): WorkingLine[] {
         ),
         result,
         answers: true,
-        reason: both('Bring the catch to a minute, then to gallons.', 'Lleve lo recogido a un minuto y luego a galones.'),
+        reason: both(
+          'Bring the catch to a minute, then to gallons.',
+          'Lleve lo recogido a un minuto y luego a galones.',
+        ),
       },
     ];
   }
@@ -120,7 +137,10 @@ function firstLines(g: Given): WorkingLine[] {
       expression: over(given(test.flow), number(nozzles)),
       result,
       answers: true,
-      reason: both('The boom’s flow is shared by its nozzles.', 'El caudal del aguilón se reparte entre sus boquillas.'),
+      reason: both(
+        'The boom’s flow is shared by its nozzles.',
+        'El caudal del aguilón se reparte entre sus boquillas.',
+      ),
     },
     {
       name: both('speed', 'velocidad'),
@@ -185,7 +205,10 @@ function hints(g: Given): readonly [Text, Text, Text] {
       ]
     : [
         first,
-        { en: `${relation.en} mph = feet × 60 ÷ (seconds × 88).`, es: `${relation.es} mph = pies × 60 ÷ (segundos × 88).` },
+        {
+          en: `${relation.en} mph = feet × 60 ÷ (seconds × 88).`,
+          es: `${relation.es} mph = pies × 60 ÷ (segundos × 88).`,
+        },
         both(en`Begin with ${test.flow} ÷ ${g.nozzles}.`, es`Empiece con ${test.flow} ÷ ${g.nozzles}.`),
       ];
 }
@@ -209,11 +232,17 @@ function figure(g: Given): BoomFigure<Text> {
   const speed = both(en`${test.speed}`, es`${test.speed}`);
   if (test.as === 'flow') {
     const flow = both(en`${test.flow}`, es`${test.flow}`);
-    const alt = both(en`${boom.en} Each gives ${flow}; the speed is ${speed}.`, es`${boom.es} Cada una da ${flow}; la velocidad es ${speed}.`);
+    const alt = both(
+      en`${boom.en} Each gives ${flow}; the speed is ${speed}.`,
+      es`${boom.es} Cada una da ${flow}; la velocidad es ${speed}.`,
+    );
     return { ...base, flow, speed, alt };
   }
   const flow = both(en`${test.caught} in ${test.time}`, es`${test.caught} en ${test.time}`);
-  const alt = both(en`${boom.en} Each gives ${flow}; the speed is ${speed}.`, es`${boom.es} Cada una da ${flow}; la velocidad es ${speed}.`);
+  const alt = both(
+    en`${boom.en} Each gives ${flow}; the speed is ${speed}.`,
+    es`${boom.es} Cada una da ${flow}; la velocidad es ${speed}.`,
+  );
   return { ...base, flow, speed, alt };
 }
 

@@ -16,10 +16,7 @@ export interface BoomSpeedGiven extends Scene {
 function facts(g: BoomSpeedGiven): Text {
   const [first, second] = g.runs;
   if (!second) {
-    return both(
-      en`The sprayer covers it in ${firstUse(first)}.`,
-      es`El rociador lo recorre en ${firstUse(first)}.`,
-    );
+    return both(en`The sprayer covers it in ${firstUse(first)}.`, es`El rociador lo recorre en ${firstUse(first)}.`);
   }
   const wish: Text = g.wanted
     ? both(en` The job wants ${firstUse(g.wanted)}.`, es` El trabajo pide ${firstUse(g.wanted)}.`)

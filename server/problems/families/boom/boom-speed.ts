@@ -98,7 +98,10 @@ function working(g: Given): readonly WorkingLine[] {
           expression: over(grouped(plus(given(first), given(second))), number(2)),
           result: given(time, { places: 1 }),
           answers: true,
-          reason: both('There and back evens out slope and wind.', 'La ida y la vuelta compensan la pendiente y el viento.'),
+          reason: both(
+            'There and back evens out slope and wind.',
+            'La ida y la vuelta compensan la pendiente y el viento.',
+          ),
         },
       ]
     : [];
@@ -147,7 +150,10 @@ function hints(g: Given): readonly [Text, Text, Text] {
     ),
     second
       ? both(en`Begin with (${first} + ${second}) ÷ 2.`, es`Empiece con (${first} + ${second}) ÷ 2.`)
-      : both(en`Begin with ${g.course.value} × 60 ÷ ${first.value}.`, es`Empiece con ${g.course.value} × 60 ÷ ${first.value}.`),
+      : both(
+          en`Begin with ${g.course.value} × 60 ÷ ${first.value}.`,
+          es`Empiece con ${g.course.value} × 60 ÷ ${first.value}.`,
+        ),
   ];
 }
 
@@ -160,7 +166,13 @@ function figure(g: Given): PlanFigure<Text> {
   const arrows = [
     { from: [length * 0.06, height / 3] as const, to: [length * 0.94, height / 3] as const, text: there },
     ...(back
-      ? [{ from: [length * 0.94, (height * 2) / 3] as const, to: [length * 0.06, (height * 2) / 3] as const, text: back }]
+      ? [
+          {
+            from: [length * 0.94, (height * 2) / 3] as const,
+            to: [length * 0.06, (height * 2) / 3] as const,
+            text: back,
+          },
+        ]
       : []),
   ];
   return {

@@ -1,7 +1,7 @@
 import { gallonsPerAcreFrom128th } from '../../../../shared/formulas/gallons-per-acre-from-128th.ts';
 import { mixForArea } from '../../../../shared/formulas/mix-for-area.ts';
 import { add, convert, quantity, ratio, scale, type Quantity } from '../../../../shared/quantity/quantity.ts';
-import { rational } from '../../../../shared/quantity/rational.ts';
+import type { Rational } from '../../../../shared/quantity/rational.ts';
 import type { PartKey } from '../../../../shared/vocabulary.ts';
 import type { Earlier, Slip } from '../../family.ts';
 import { en, es } from '../../say.ts';
@@ -10,7 +10,7 @@ import type { Hand128thGiven } from './hand-128th-texts.ts';
 
 type Given = Hand128thGiven;
 
-const gpa = (value: ReturnType<typeof rational>) => quantity(value, 'gal/acre');
+const gpa = (value: Rational) => quantity(value, 'gal/acre');
 const catchAgain = (g: Given) => (g.test.as === 'short-catch' ? g.test : null);
 
 /** What the nozzle gives in the time that the plot takes. */
@@ -121,7 +121,8 @@ const thousandSlips: readonly Slip<Given>[] = [
   {
     key: 'multiplied-for-divided',
     part: 'b',
-    answer: (g, earlier) => (catchAgain(g) ? null : quantity((earlier.a ?? rate(g, {})).value.mul('43.56'), 'gal/1000-sq-ft')),
+    answer: (g, earlier) =>
+      catchAgain(g) ? null : quantity((earlier.a ?? rate(g, {})).value.mul('43.56'), 'gal/1000-sq-ft'),
     message: () => ({
       en: 'You multiplied by 43.56. 1,000 sq ft is a small part of an acre, so divide.',
       es: 'Usted multiplicó por 43.56. 1,000 pies² son una parte pequeña de un acre, así que divida.',
@@ -130,7 +131,8 @@ const thousandSlips: readonly Slip<Given>[] = [
   {
     key: 'used-1000',
     part: 'b',
-    answer: (g, earlier) => (catchAgain(g) ? null : quantity((earlier.a ?? rate(g, {})).value.div(1000), 'gal/1000-sq-ft')),
+    answer: (g, earlier) =>
+      catchAgain(g) ? null : quantity((earlier.a ?? rate(g, {})).value.div(1000), 'gal/1000-sq-ft'),
     message: () => ({
       en: 'You divided by 1,000. An acre holds 43.56 areas of 1,000 sq ft, so divide by 43.56.',
       es: 'Usted dividió entre 1,000. Un acre tiene 43.56 áreas de 1,000 pies², así que divida entre 43.56.',

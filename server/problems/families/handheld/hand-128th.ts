@@ -82,7 +82,10 @@ function parts(g: Given, earlier: Earlier): readonly NumberPart[] {
     // 43.5 and 44 thousands of square feet in an acre are in use, too.
     const alsoRight = ['43.5', '44'].map((per) => scale(thousand, rational('43.56').div(per)));
     const units = ['gal/1000-sq-ft', 'gal/acre'] as const;
-    return [gallons, { kind: 'number', key: 'b', topic: 'rate', ask, answer: thousand, step: hundredth, units, alsoRight }];
+    return [
+      gallons,
+      { kind: 'number', key: 'b', topic: 'rate', ask, answer: thousand, step: hundredth, units, alsoRight },
+    ];
   }
   const caught: NumberPart = {
     kind: 'number',
@@ -116,11 +119,7 @@ function rateLine(g: Given): WorkingLine {
   const caught = caughtOnPlot(g);
   return {
     name: both('rate', 'dosis del rociador'),
-    expression: times(
-      struck(caught, 2),
-      number(128),
-      over(given(quantity(1, 'gal')), struck(quantity(128, 'fl-oz'))),
-    ),
+    expression: times(struck(caught, 2), number(128), over(given(quantity(1, 'gal')), struck(quantity(128, 'fl-oz')))),
     result: toTenth(rate(g, {})),
     answers: true,
     reason: both(
@@ -163,7 +162,10 @@ function working(g: Given): readonly WorkingLine[] {
       expression: times(given(test.caught), over(struck(plotTime), struck(test.catchTime))),
       result: toTenth(caughtOnPlot(g)),
       answers: true,
-      reason: both('The flow is steady, so the catch grows with the time.', 'El caudal es parejo: lo recogido crece con el tiempo.'),
+      reason: both(
+        'The flow is steady, so the catch grows with the time.',
+        'El caudal es parejo: lo recogido crece con el tiempo.',
+      ),
     },
     rateLine(g),
     {
@@ -196,19 +198,22 @@ function hints(g: Given): readonly [Text, Text, Text] {
       );
   const begin =
     test.as === 'short-catch'
-      ? both(en`Begin with ${test.caught} ÷ ${test.catchTime} × ${plotTime}.`, es`Empiece con ${test.caught} ÷ ${test.catchTime} × ${plotTime}.`)
+      ? both(
+          en`Begin with ${test.caught} ÷ ${test.catchTime} × ${plotTime}.`,
+          es`Empiece con ${test.caught} ÷ ${test.catchTime} × ${plotTime}.`,
+        )
       : test.as === 'caught'
         ? both(
             'An acre is 128 such plots; a gallon is 128 fluid ounces. Multiply by 128 and divide by 128: what is left?',
             'Un acre son 128 parcelas así; un galón son 128 onzas líquidas. Multiplique por 128 y divida entre 128: ¿qué queda?',
           )
-        : both(en`Begin with the catch: 32 fl oz plus ${test.ounces}.`, es`Empiece con lo recogido: 32 oz líq más ${test.ounces}.`);
+        : both(
+            en`Begin with the catch: 32 fl oz plus ${test.ounces}.`,
+            es`Empiece con lo recogido: 32 oz líq más ${test.ounces}.`,
+          );
   return [
     first,
-    both(
-      'Fluid ounces on 1/128 acre = gallons per acre.',
-      'Onzas líquidas en 1/128 de acre = galones por acre.',
-    ),
+    both('Fluid ounces on 1/128 acre = gallons per acre.', 'Onzas líquidas en 1/128 de acre = galones por acre.'),
     begin,
   ];
 }

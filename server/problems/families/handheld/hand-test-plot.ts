@@ -91,10 +91,7 @@ function parts(g: Given, earlier: Earlier): readonly NumberPart[] {
     kind: 'number',
     key: 'c',
     topic: 'handheld',
-    ask: both(
-      'And in gallons per acre, to the nearest 0.1 gal?',
-      '¿Y en galones por acre, redondeada a 0.1 gal?',
-    ),
+    ask: both('And in gallons per acre, to the nearest 0.1 gal?', '¿Y en galones por acre, redondeada a 0.1 gal?'),
     answer,
     step: tenth,
     units: ['gal/acre', 'gal/1000-sq-ft'],
@@ -150,7 +147,11 @@ function working(g: Given): readonly WorkingLine[] {
     rate,
     {
       name: both('rate for an acre', 'dosis por acre'),
-      expression: times(given(perThousand(g, {}), { maxPlaces: 4 }), { is: 'number', value: rational('43.56'), maxPlaces: 2 }),
+      expression: times(given(perThousand(g, {}), { maxPlaces: 4 }), {
+        is: 'number',
+        value: rational('43.56'),
+        maxPlaces: 2,
+      }),
       result: toTenth(perAcre(g, {})),
       answers: true,
       reason: both(

@@ -159,10 +159,7 @@ function hints(g: Given): readonly [Text, Text, Text] {
       'Mix = water of the trial × all plants ÷ plants in the trial. Product = gallons of mix × product for one gallon.',
       'Mezcla = agua de la prueba × todas las plantas ÷ plantas de la prueba. Producto = galones de mezcla × producto por galón.',
     ),
-    both(
-      en`Begin with one plant: ${g.used} ÷ ${g.tried}.`,
-      es`Empiece con una planta: ${g.used} ÷ ${g.tried}.`,
-    ),
+    both(en`Begin with one plant: ${g.used} ÷ ${g.tried}.`, es`Empiece con una planta: ${g.used} ÷ ${g.tried}.`),
   ];
 }
 

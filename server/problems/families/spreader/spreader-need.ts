@@ -4,11 +4,12 @@ import type { Text, Tier } from '../../../../shared/vocabulary.ts';
 import { defineFamily, type Earlier, type NumberPart, type Part } from '../../family.ts';
 import type { Rng } from '../../rng.ts';
 import { en, es } from '../../say.ts';
-import { drawScene, places, situationOf } from '../../situations.ts';
+import { drawScene, situationOf } from '../../situations.ts';
 import { given, number, over, struck, times, type WorkingLine } from '../../working.ts';
 import { areaUnits, oneSqFt } from '../area/plan-parts.ts';
 import { both } from '../both.ts';
 import { toTenth } from '../rate/measure-out.ts';
+import { placesWithField } from '../places-with-field.ts';
 import { labelUse } from '../spot/mix-lines.ts';
 import { granuleHeading, granuleLines } from './granule-lines.ts';
 import { bags, pounds, productPart, siteArea, spreaderNeedSlips, thousand } from './spreader-need-slips.ts';
@@ -26,9 +27,6 @@ const ranges = {
   turf: { width: [110, 160], longer: [40, 120] },
 } as const;
 const areas = { bed: [6, 28], lawn: [25, 140], turf: [180, 400] } as const;
-
-/** Places that would have a sports field. */
-const placesWithField = places.filter(({ key }) => ['school', 'community-center', 'park-lodge', 'office-park'].includes(key));
 
 function draw(rng: Rng, tier: Tier): Given | null {
   const line = rng.pick(granuleLines);

@@ -26,7 +26,5 @@ export function percentHeading(line: PercentLine): Text {
 /** What is sprayed; trees on a line for dormant trees are dormant. */
 export function percentTarget(line: PercentLine): Text {
   const rate = rateOf(line);
-  return rate.note?.en.includes('Dormant')
-    ? both('the dormant trees', 'los árboles en reposo')
-    : targetOf(rate.site);
+  return rate.note?.en.includes('Dormant') ? both('the dormant trees', 'los árboles en reposo') : targetOf(rate.site);
 }

@@ -1,6 +1,6 @@
 import { productForPercentVolume } from '../../../../shared/formulas/product-for-percent-volume.ts';
 import { add, convert, quantity, scale, type Quantity } from '../../../../shared/quantity/quantity.ts';
-import { rational } from '../../../../shared/quantity/rational.ts';
+import { rational, type Rational } from '../../../../shared/quantity/rational.ts';
 import type { PartKey } from '../../../../shared/vocabulary.ts';
 import type { Earlier, Slip } from '../../family.ts';
 import { en, es } from '../../say.ts';
@@ -33,7 +33,7 @@ export function inQuarts(g: Given, earlier: Earlier): Quantity {
   return g.job.as === 'loads' ? convert(add(scale(full, g.job.fullLoads), last), 'qt') : convert(full, 'qt');
 }
 
-const flOz = (value: ReturnType<typeof rational>) => quantity(value, 'fl-oz');
+const flOz = (value: Rational) => quantity(value, 'fl-oz');
 /** The percent as a bare decimal, written wrongly by one place: 2% as 0.2. */
 const share = (g: Given) => g.line.percent.value.div(100);
 

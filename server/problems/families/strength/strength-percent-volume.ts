@@ -65,7 +65,10 @@ function parts(g: Given, earlier: Earlier): readonly NumberPart[] {
     );
     const fromRounded = inMilliliters(g, { a: toWholeSteps(productForTank(g), tenth) });
     const alsoRight = [...byThirtyMl(answer, 'fl-oz'), fromRounded, ...byThirtyMl(fromRounded, 'fl-oz')];
-    return [full, { kind: 'number', key: 'b', topic: 'units', ask, answer, step: rational(1), units: ['ml', 'l'], alsoRight }];
+    return [
+      full,
+      { kind: 'number', key: 'b', topic: 'units', ask, answer, step: rational(1), units: ['ml', 'l'], alsoRight },
+    ];
   }
   const last = productPart({
     key: 'b',

@@ -27,7 +27,10 @@ function facts(g: TankLoadsGiven): Text {
     es`El ${tankName(g)} tiene capacidad para ${tank}; todas las cargas van llenas, menos la última.`,
   );
   if (job.as === 'mix') {
-    return both(en`The job takes ${firstUse(job.mix)} of mix. ${full.en}`, es`El trabajo lleva ${firstUse(job.mix)} de mezcla. ${full.es}`);
+    return both(
+      en`The job takes ${firstUse(job.mix)} of mix. ${full.en}`,
+      es`El trabajo lleva ${firstUse(job.mix)} de mezcla. ${full.es}`,
+    );
   }
   if (job.as === 'area') {
     return both(

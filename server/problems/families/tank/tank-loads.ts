@@ -5,12 +5,22 @@ import type { Text, Tier } from '../../../../shared/vocabulary.ts';
 import { defineFamily, type Earlier, type NumberPart, type Part } from '../../family.ts';
 import type { Rng } from '../../rng.ts';
 import { en, es } from '../../say.ts';
-import { drawScene, places, situationOf } from '../../situations.ts';
+import { drawScene, situationOf } from '../../situations.ts';
 import { given, minus, number, over, struck, times, type WorkingLine } from '../../working.ts';
 import { both } from '../both.ts';
+import { placesWithField } from '../places-with-field.ts';
 import { toTenth } from '../rate/measure-out.ts';
 import { toStep } from '../units/unit-steps.ts';
-import { exactLoads, last, loads, mixNeeded, partsOf, siteAcres, siteArea, tankLoadsSlips } from './tank-loads-slips.ts';
+import {
+  exactLoads,
+  last,
+  loads,
+  mixNeeded,
+  partsOf,
+  siteAcres,
+  siteArea,
+  tankLoadsSlips,
+} from './tank-loads-slips.ts';
 import { tankLoadsSituations, type TankLoadsGiven } from './tank-loads-texts.ts';
 
 type Given = TankLoadsGiven;
@@ -18,8 +28,6 @@ type Given = TankLoadsGiven;
 const tenth = rational('0.1');
 const thousandth = rational('0.001');
 const gal = (value: number | string) => quantity(value, 'gal');
-const placesWithField = places.filter(({ key }) => ['school', 'community-center', 'park-lodge', 'office-park'].includes(key));
-
 function drawJob(rng: Rng, tier: Tier): Pick<Given, 'tank' | 'job'> {
   if (tier === 1) return { tank: gal(rng.pick([2, 3, 4])), job: { as: 'mix', mix: gal(rng.int(9, 34) / 2) } };
   if (tier === 2) {
@@ -102,9 +110,7 @@ function parts(g: Given, earlier: Earlier): readonly Part[] {
     units: ['gal', 'qt', 'l'],
   };
   if (g.job.as === 'mix') return [count, rest];
-  return g.job.as === 'area'
-    ? [mixPart(g, earlier), count, rest]
-    : [acresPart(g), mixPart(g, earlier), count, rest];
+  return g.job.as === 'area' ? [mixPart(g, earlier), count, rest] : [acresPart(g), mixPart(g, earlier), count, rest];
 }
 
 function mixLines(g: Given): WorkingLine[] {
@@ -164,7 +170,10 @@ function working(g: Given): readonly WorkingLine[] {
       name: both('loads', 'cargas'),
       result: number(loads(g, {}).value),
       answers: true,
-      reason: both('The part of a tank is a load, too, so round up.', 'La parte de un tanque también es una carga: redondee hacia arriba.'),
+      reason: both(
+        'The part of a tank is a load, too, so round up.',
+        'La parte de un tanque también es una carga: redondee hacia arriba.',
+      ),
     },
     {
       name: both('last load', 'última carga'),
@@ -195,7 +204,10 @@ function hints(g: Given): readonly [Text, Text, Text] {
   const mix = both('Mix = area × rate. ', 'Mezcla = área × dosis. ');
   const begin =
     job.as === 'area'
-      ? both(en`Begin with the mix: ${job.area} ÷ 1,000, times ${job.rate.value}.`, es`Empiece con la mezcla: ${job.area} ÷ 1,000, por ${job.rate.value}.`)
+      ? both(
+          en`Begin with the mix: ${job.area} ÷ 1,000, times ${job.rate.value}.`,
+          es`Empiece con la mezcla: ${job.area} ÷ 1,000, por ${job.rate.value}.`,
+        )
       : both(
           en`Begin with the area: ${job.length} × ${job.width}, then divide by 43,560.`,
           es`Empiece con el área: ${job.length} × ${job.width} y divida entre 43,560.`,
@@ -208,7 +220,10 @@ function figure({ tank }: Given): TankFigure<Text> {
     kind: 'tank',
     level: 1,
     capacity: both(en`${tank}`, es`${tank}`),
-    alt: both(en`A sprayer tank that holds ${tank} when full.`, es`Un tanque de rociador donde caben ${tank} cuando está lleno.`),
+    alt: both(
+      en`A sprayer tank that holds ${tank} when full.`,
+      es`Un tanque de rociador donde caben ${tank} cuando está lleno.`,
+    ),
   };
 }
 
