@@ -102,9 +102,8 @@ CREATE TABLE "answer" (
 	"seconds" integer NOT NULL,
 	"key" uuid NOT NULL,
 	"at" timestamp (3) with time zone NOT NULL,
-	CONSTRAINT "answer_user_id_id_pk" PRIMARY KEY("user_id","id"),
-	CONSTRAINT "answer_once" UNIQUE("user_id","key"),
-	CONSTRAINT "answer_attempt" UNIQUE("user_id","problem_id","part","attempt")
+	CONSTRAINT "answer_user_id_problem_id_part_attempt_pk" PRIMARY KEY("user_id","problem_id","part","attempt"),
+	CONSTRAINT "answer_once" UNIQUE("user_id","key")
 );
 --> statement-breakpoint
 CREATE TABLE "day_count" (
@@ -142,8 +141,7 @@ CREATE TABLE "problem" (
 	"hints" smallint DEFAULT 0 NOT NULL,
 	"shown_at" timestamp (3) with time zone DEFAULT now() NOT NULL,
 	"closed_at" timestamp (3) with time zone,
-	CONSTRAINT "problem_user_id_id_pk" PRIMARY KEY("user_id","id"),
-	CONSTRAINT "problem_place" UNIQUE("user_id","drill_id","position")
+	CONSTRAINT "problem_user_id_id_pk" PRIMARY KEY("user_id","id")
 );
 --> statement-breakpoint
 CREATE TABLE "slip_count" (
@@ -189,6 +187,7 @@ ALTER TABLE "user_role" ADD CONSTRAINT "user_role_user_id_user_id_fk" FOREIGN KE
 CREATE INDEX "account_user" ON "account" USING btree ("user_id");--> statement-breakpoint
 CREATE INDEX "session_user" ON "session" USING btree ("user_id");--> statement-breakpoint
 CREATE INDEX "verification_identifier" ON "verification" USING btree ("identifier");--> statement-breakpoint
-CREATE INDEX "answer_recent" ON "answer" USING btree ("user_id","at");--> statement-breakpoint
+CREATE INDEX "answer_by_time" ON "answer" USING btree ("user_id","id");--> statement-breakpoint
 CREATE INDEX "drill_recent" ON "drill" USING btree ("user_id","created_at" DESC NULLS LAST);--> statement-breakpoint
-CREATE INDEX "problem_checkpoint" ON "problem" USING btree ("user_id","lesson","checkpoint","shown_at");
+CREATE UNIQUE INDEX "problem_place" ON "problem" USING btree ("user_id","drill_id","position") WHERE "problem"."drill_id" is not null;--> statement-breakpoint
+CREATE INDEX "problem_checkpoint" ON "problem" USING btree ("user_id","lesson","checkpoint","shown_at") WHERE "problem"."lesson" is not null;

@@ -93,7 +93,7 @@ async function workProblem(options: {
     const response = right ? rightResponse(part) : wrongResponse(rng, problem, part);
     const target = { problemId, part: part.key };
     const reply = await practice.answer(worker, target, { key: uuidv7({ msecs: clock.at }), response, seconds });
-    const open = reply.problem.parts.find((one) => one.key === part.key)?.state === 'open';
+    const open = reply.parts.find((one) => one.key === part.key)?.state === 'open';
     if (open && rng.chance(2, 3)) {
       clock.at += 30_000;
       await practice.answer(worker, target, {

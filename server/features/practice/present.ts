@@ -74,20 +74,19 @@ function form(problem: Problem, part: Part, closed: boolean, locale: Locale) {
   }
 }
 
-/** The view of a problem that its own person may see now. Answers appear only in parts that are closed. */
-export function problemView(options: {
+interface Shown {
   problem: Problem;
   standing: Standing;
   place: Place;
   locale: Locale;
-}): ProblemView {
-  const { problem, standing, place, locale } = options;
+}
+
+/** The parts of a problem as its own person may see them now. Answers appear only in parts that are closed. */
+export function partViews({ problem, standing, place, locale }: Shown): PartView[] {
   const { family, given } = problem;
-  const use = family.label?.(given);
-  const done = isDone(problem, standing);
   const current = problem.parts.find((part) => !standing.closed.has(part.key))?.key;
   const hints = current && place.hints > 0 ? family.hints(given).slice(0, place.hints) : [];
-  const parts = problem.parts.map((part): PartView => {
+  return problem.parts.map((part): PartView => {
     const closed = standing.closed.has(part.key);
     return {
       key: part.key,
@@ -101,6 +100,14 @@ export function problemView(options: {
       ...form(problem, part, closed, locale),
     };
   });
+}
+
+/** The whole view of a problem; the worked solution only once every part is closed. */
+export function problemView(shown: Shown): ProblemView {
+  const { problem, standing, place, locale } = shown;
+  const { family, given } = problem;
+  const use = family.label?.(given);
+  const done = isDone(problem, standing);
   return {
     id: place.id,
     topic: family.topic,
@@ -109,7 +116,7 @@ export function problemView(options: {
     statement: family.statement(given)[locale],
     figure: family.figure ? (localize(family.figure(given), locale) as Figure) : null,
     label: use ? labelView(use.label, locale) : null,
-    parts,
+    parts: partViews(shown),
     working: done ? workingView(problem, locale) : null,
     state: done ? 'done' : 'open',
     drill: place.drill,

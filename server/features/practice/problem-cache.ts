@@ -5,7 +5,7 @@ import { generate, type Problem } from '../../problems/engine.ts';
 import { familyVersion } from '../../problems/registry.ts';
 
 /** Problems kept at hand between showing and answering; the oldest gives way. */
-const mostKept = 2_000;
+const mostKept = 5_000;
 
 /** 80 random bits as text: nobody guesses a seed, and no two problems meet. */
 export function randomSeed(): string {

@@ -39,7 +39,7 @@ export interface Loaded {
     drillLength: number | null;
     closedAt: string | null;
   };
-  answers: LoggedAnswer[];
+  answers: (LoggedAnswer & { id: string })[];
   /** Null until the person's first answer. `sequence` tells whether somebody else wrote in between. */
   ability: (BeliefRow & { sequence: number }) | null;
   topics: TopicRow[];
@@ -90,7 +90,10 @@ export function practiceRepo(db: NodePgDatabase, pool: Pool) {
   return {
     async load(userId: string, problemId: string): Promise<Loaded | null> {
       const { rows } = await pool.query<Loaded>({ name: 'practice-load', text: loadSql, values: [userId, problemId] });
-      return rows[0] ?? null;
+      const found = rows[0];
+      // Identifiers are time-ordered. Sorting a handful here keeps the statement on the index by problem.
+      found?.answers.sort((a, b) => (a.id < b.id ? -1 : 1));
+      return found ?? null;
     },
 
     /** Makes the row that an answer's write will change; does nothing when it is there. */

@@ -35,8 +35,8 @@ export function practiceRoutes(practice: PracticeService, progress: Pick<Progres
       body: answerBodySchema,
       reply: answerReplySchema,
       handler: async ({ person, params, body }): Promise<AnswerReply> => {
-        const { unreadable, problem, levels, topic } = await practice.answer(person, params, body);
-        return { unreadable, problem, level: levels && progress.levelAfter(levels, topic) };
+        const { levels, topic, ...shown } = await practice.answer(person, params, body);
+        return { ...shown, level: levels && progress.levelAfter(levels, topic) };
       },
     }),
     route({

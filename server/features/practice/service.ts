@@ -8,7 +8,7 @@ import { earnsMark, gradePart, isUnreadable, type Graded, type Response } from '
 import { familyByKey } from '../../problems/registry.ts';
 import { blankMessage, unreadableMessages } from '../../problems/verdict-messages.ts';
 import { dayIn, noLevels, withAnswer, type PersonLevels } from './levels.ts';
-import { problemView, type Place } from './present.ts';
+import { partViews, problemView, type Place } from './present.ts';
 import { problemCache, randomSeed } from './problem-cache.ts';
 import { earlierFor, isDone, replay, take, type LoggedAnswer, type Standing } from './replay.ts';
 import type { AnswerWrite, Loaded, PracticeRepo, RecordWrite } from './repo.ts';
@@ -253,8 +253,8 @@ export function practiceService({ repo, zone, now, newId = () => uuidv7() }: Pra
       });
       if (!topic) throw new AppError('not-found');
       const { problem, standing, loaded, levels } = result;
-      const shown = problemView({ problem, standing, place: placeOf(loaded), locale: worker.language });
-      return { unreadable, problem: shown, levels, topic };
+      const parts = partViews({ problem, standing, place: placeOf(loaded), locale: worker.language });
+      return { unreadable, parts, state: isDone(problem, standing) ? 'done' : 'open', levels, topic };
     },
 
     /** Shows the next hint; asking again for one already shown changes nothing. */

@@ -1,15 +1,15 @@
 // The two statements of the hot path, prepared by name: reading all that grading needs, and recording an answer with
 // everything that follows from it as one atomic statement.
 
-/** $1 user, $2 problem. One row or none; the owner stands in the WHERE. */
+/** $1 user, $2 problem. One row or none; the owner stands in the WHERE. Answers come in no order: the caller sorts. */
 export const loadSql = `
 select json_build_object(
     'id', p.id, 'family', p.family, 'version', p.version, 'seed', p.seed, 'tier', p.tier, 'context', p.context,
     'hints', p.hints, 'drillId', p.drill_id, 'position', p.position, 'drillLength', d.length, 'closedAt', p.closed_at
   ) as problem,
   coalesce((
-    select json_agg(json_build_object('part', a.part, 'response', a.response, 'read', a.read, 'value', a.value,
-      'verdict', a.verdict, 'slip', a.slip, 'attempt', a.attempt, 'isFirst', a.is_first, 'key', a.key) order by a.id)
+    select json_agg(json_build_object('id', a.id, 'part', a.part, 'response', a.response, 'read', a.read, 'value', a.value,
+      'verdict', a.verdict, 'slip', a.slip, 'attempt', a.attempt, 'isFirst', a.is_first, 'key', a.key))
     from answer a where a.user_id = p.user_id and a.problem_id = p.id), '[]'::json) as answers,
   case when ab.user_id is null then null
     else json_build_object('mean', ab.mean, 'variance', ab.variance, 'sequence', ab.sequence) end as ability,
