@@ -1,9 +1,9 @@
 import { QueryClientProvider } from '@tanstack/react-query';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
-import { RouterProvider } from 'react-router/dom';
+import { BrowserRouter } from 'react-router';
 import { queryClient } from './lib/query-client.ts';
-import { router } from './router.tsx';
+import { Pages } from './router.tsx';
 import './styles.css';
 
 const root = document.getElementById('root');
@@ -11,7 +11,9 @@ if (!root) throw new Error('The page has no root element.');
 createRoot(root).render(
   <StrictMode>
     <QueryClientProvider client={queryClient}>
-      <RouterProvider router={router} />
+      <BrowserRouter>
+        <Pages />
+      </BrowserRouter>
     </QueryClientProvider>
   </StrictMode>,
 );

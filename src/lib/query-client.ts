@@ -1,4 +1,4 @@
-import { QueryClient } from '@tanstack/react-query';
+import { MutationCache, QueryCache, QueryClient } from '@tanstack/react-query';
 import { ApiError } from './api.ts';
 
 const mostRetries = 2;
@@ -9,6 +9,15 @@ function worthRetrying(count: number, error: unknown): boolean {
   return !refused && count < mostRetries;
 }
 
-export const queryClient = new QueryClient({
+/** A session that ran out or was ended elsewhere: ask who is here, and the page will lead to signing in. */
+function onError(error: unknown): void {
+  if (error instanceof ApiError && error.code === 'not-signed-in') {
+    void queryClient.invalidateQueries({ queryKey: ['session'] });
+  }
+}
+
+export const queryClient: QueryClient = new QueryClient({
+  queryCache: new QueryCache({ onError }),
+  mutationCache: new MutationCache({ onError }),
   defaultOptions: { queries: { retry: worthRetrying, staleTime: 15_000 }, mutations: { retry: false } },
 });

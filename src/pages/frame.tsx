@@ -1,12 +1,17 @@
 import { useStore } from '@nanostores/react';
-import { Link, NavLink, Outlet, ScrollRestoration, useNavigation } from 'react-router';
+import { useQuery } from '@tanstack/react-query';
+import { Suspense, useLayoutEffect } from 'react';
+import { Link, NavLink, Outlet, useLocation } from 'react-router';
 import type { MeView } from '../../shared/contracts/account.ts';
 import { chooseLocale, languageNames, useLocale } from '../i18n/i18n.ts';
 import { shellMessages } from '../i18n/shell.ts';
-import { mayDo, useSession } from '../lib/session.ts';
+import { useScrollMemory } from '../lib/scroll-memory.ts';
+import { mayDo, sessionQuery } from '../lib/session.ts';
 import { paths } from '../paths.ts';
 import { ButtonLink } from '../ui/button.tsx';
+import { Loading } from '../ui/loading.tsx';
 import { Mark } from '../ui/mark.tsx';
+import { Broken, PageBoundary } from './broken.tsx';
 
 const railLink =
   'flex min-h-11 items-center justify-center border-t-[3px] border-transparent px-2 text-sm font-medium text-ink no-underline wide:justify-start wide:border-t-0 wide:border-l-[3px] wide:px-2.5 wide:text-base aria-[current=page]:border-dye aria-[current=page]:bg-dye-wash aria-[current=page]:font-bold';
@@ -93,30 +98,44 @@ function Top({ mailbox }: { mailbox: boolean }) {
   );
 }
 
+/** The page in hand: what it throws is caught, and while it is fetched something is seen at once. */
+function Page() {
+  const { pathname } = useLocation();
+  return (
+    <PageBoundary key={pathname}>
+      <Suspense fallback={<Loading />}>
+        <Outlet />
+      </Suspense>
+    </PageBoundary>
+  );
+}
+
 /** What stands round every page: the way through the product, a bar below on phones and a rail on wide screens. */
 export function Frame() {
   const t = useStore(shellMessages);
-  const session = useSession();
-  const busy = useNavigation().state !== 'idle';
+  const { data: session, error } = useQuery(sessionQuery);
   const me = session?.me ?? null;
   const mailbox = session?.mailbox ?? false;
+  const language = me?.language;
+  useScrollMemory();
+  useLayoutEffect(() => {
+    if (language !== undefined) chooseLocale(language);
+  }, [language]);
   return (
     <div className={me ? 'min-h-screen pb-20 wide:flex wide:pb-0' : 'min-h-screen'}>
       <a href="#content" className="sr-only focus:not-sr-only focus:absolute focus:z-30 focus:bg-sheet focus:p-3">
         {t.skip}
       </a>
-      {busy && <div aria-hidden="true" className="fixed inset-x-0 top-0 z-30 h-1 animate-pulse bg-dye" />}
       {me ? <Rail me={me} mailbox={mailbox} /> : <Top mailbox={mailbox} />}
       <main
         id="content"
         tabIndex={-1}
         data-quiet-focus=""
-        aria-busy={busy}
         className={`w-full min-w-0 px-4 py-4 wide:px-9 wide:py-7 ${me ? 'max-w-[76rem]' : 'mx-auto max-w-[72rem]'}`}
       >
-        <Outlet />
+        {session && <Page />}
+        {!session && (error ? <Broken error={error} /> : <Loading />)}
       </main>
-      <ScrollRestoration />
     </div>
   );
 }

@@ -16,5 +16,3 @@ export function NotFound() {
     </>
   );
 }
-
-export default NotFound;

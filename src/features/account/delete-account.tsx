@@ -13,11 +13,11 @@ export function DeleteAccount({ me, onDone }: { me: MeView; onDone: () => void }
   const [asking, setAsking] = useState(false);
   const [password, setPassword] = useState('');
   const [missing, setMissing] = useState(false);
-  const remove = useDeleteMe();
+  const remove = useDeleteMe(onDone);
   const submit = (event: FormEvent) => {
     event.preventDefault();
     setMissing(password === '');
-    if (password !== '') remove.mutate(password, { onSuccess: onDone });
+    if (password !== '') remove.mutate(password);
   };
   return (
     <>

@@ -17,7 +17,6 @@ export function useChangeMe() {
     onSuccess: (me) => {
       client.setQueryData<SessionView>(sessionQuery.queryKey, (session) => session && { ...session, me });
       if (me.language === locale.get()) return undefined;
-      locale.set(me.language);
       // Problems, lessons and slips come from the server in the reader's language.
       return client.invalidateQueries({ predicate: (query) => query.queryKey[0] !== 'session' });
     },
@@ -45,15 +44,25 @@ export function useEndSession() {
   });
 }
 
-export function useSignOut() {
+/** `leave` goes to a page for everyone first: the guarded one would ask to sign in again. */
+export function useSignOut(leave: () => void) {
   const changed = useSessionChange();
-  return useMutation({ mutationFn: () => api('POST', '/api/auth/sign-out', {}), onSuccess: changed });
+  return useMutation({
+    mutationFn: () => api('POST', '/api/auth/sign-out', {}),
+    onSuccess: () => {
+      leave();
+      return changed();
+    },
+  });
 }
 
-export function useDeleteMe() {
+export function useDeleteMe(leave: () => void) {
   const changed = useSessionChange();
   return useMutation({
     mutationFn: (password: string) => api('DELETE', '/api/me', { password }),
-    onSuccess: changed,
+    onSuccess: () => {
+      leave();
+      return changed();
+    },
   });
 }

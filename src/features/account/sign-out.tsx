@@ -6,14 +6,10 @@ import { useSignOut } from './queries.ts';
 
 export function SignOut({ onDone }: { onDone: () => void }) {
   const t = useStore(accountMessages);
-  const signOut = useSignOut();
+  const signOut = useSignOut(onDone);
   return (
     <>
-      <Button
-        look="quiet"
-        disabled={signOut.isPending}
-        onClick={() => signOut.mutate(undefined, { onSuccess: onDone })}
-      >
+      <Button look="quiet" disabled={signOut.isPending} onClick={() => signOut.mutate()}>
         {t.signOut}
       </Button>
       <Failure error={signOut.error} className="mt-3" />

@@ -3,6 +3,7 @@ import { useEffect, useRef, useState } from 'react';
 import type { LessonSummary } from '../../../shared/contracts/lessons.ts';
 import { useFormat } from '../../i18n/i18n.ts';
 import { lessonMessages } from '../../i18n/lessons.ts';
+import { ApiError } from '../../lib/api.ts';
 import { Chip } from '../../ui/chip.tsx';
 import { useSaveProgress } from './queries.ts';
 import type { LessonModule } from './lesson-text.ts';
@@ -12,18 +13,20 @@ export function LessonEnd({ lesson, done }: { lesson: LessonSummary; done: numbe
   const t = useStore(lessonMessages);
   const end = useRef<HTMLDivElement>(null);
   const [seen, setSeen] = useState(false);
-  const { mutate } = useSaveProgress(lesson.slug);
+  const { mutate, error } = useSaveProgress(lesson.slug);
   const isRead = lesson.progress?.state === 'read';
-  const left = lesson.checkpoints.length - done;
+  const unfinished = error instanceof ApiError && error.code === 'lesson-unfinished';
+  const left = Math.max(1, lesson.checkpoints.length - done);
   useEffect(() => {
     if (!end.current) return undefined;
     const watch = new IntersectionObserver((entries) => entries.some((entry) => entry.isIntersecting) && setSeen(true));
     watch.observe(end.current);
     return () => watch.disconnect();
   }, []);
+  // Asked again at every checkpoint that is done: the server knows which are missing.
   useEffect(() => {
-    if (seen && left <= 0 && !isRead) mutate({ position: 1, state: 'read' });
-  }, [seen, left, isRead, mutate]);
+    if (seen && !isRead) mutate({ position: 1, state: 'read' });
+  }, [seen, done, isRead, mutate]);
   return (
     <div ref={end} role="status" className="mt-8 border-t-2 border-ink pt-4">
       {isRead ? (
@@ -31,7 +34,7 @@ export function LessonEnd({ lesson, done }: { lesson: LessonSummary; done: numbe
           <Chip tone="mark">{t.read}</Chip> {t.isRead}
         </p>
       ) : (
-        <p className="text-ink-soft">{left > 0 ? t.missing(left) : t.endReach}</p>
+        <p className="text-ink-soft">{unfinished ? t.missing(left) : t.endReach}</p>
       )}
     </div>
   );

@@ -17,7 +17,8 @@ export function useReadingPlace(onPlace: (place: number) => void) {
     let timer: number | undefined;
     let last = -1;
     const look = () => {
-      if (!text.current) return;
+      // While the text is still being fetched there is no place in it.
+      if (!text.current || text.current.offsetHeight < window.innerHeight / 2) return;
       const place = Number(placeIn(text.current.getBoundingClientRect(), window.innerHeight).toFixed(3));
       if (Math.abs(place - last) < 0.01) return;
       last = place;

@@ -5,7 +5,7 @@ import type { Topic } from '../../../shared/vocabulary.ts';
 import { drillMessages } from '../../i18n/drills.ts';
 import { topicMessages } from '../../i18n/words.ts';
 import { Button } from '../../ui/button.tsx';
-import { Notice } from '../../ui/notice.tsx';
+import { Failure } from '../../ui/failure.tsx';
 import { useNewDrill } from './queries.ts';
 
 const lengths = [5, 10, 20] as const;
@@ -120,11 +120,7 @@ export function DrillForm({ levels, chosen, onMade }: DrillFormProps) {
           ))}
         </div>
       </fieldset>
-      {make.error && (
-        <Notice tone="error" className="mb-3">
-          {make.error.message}
-        </Notice>
-      )}
+      <Failure error={make.error} />
       <Button type="submit" disabled={make.isPending}>
         {t.start}
       </Button>

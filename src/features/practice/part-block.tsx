@@ -4,6 +4,7 @@ import type { PartView, Response } from '../../../shared/contracts/practice.ts';
 import { practiceMessages } from '../../i18n/practice.ts';
 import { ApiError } from '../../lib/api.ts';
 import { Button } from '../../ui/button.tsx';
+import { useFailureText } from '../../ui/failure.tsx';
 import { VerdictPanel } from '../../ui/verdict.tsx';
 import { ChoiceField } from './choice-field.tsx';
 import { useDraft } from './draft.ts';
@@ -43,6 +44,7 @@ export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
   const [unit, keepUnit] = useDraft(`${problemId}.${part.key}.unit`, units[0]?.key ?? '');
   const [waiting, setWaiting] = useState(false);
   const [refused, setRefused] = useState<string | null>(null);
+  const failureText = useFailureText();
   const seconds = useSeconds();
   const answer = useAnswer(problemId, setWaiting);
   const verdict = useRef<HTMLDivElement>(null);
@@ -67,7 +69,7 @@ export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
           else if (reply.parts.find((one) => one.key === part.key)?.state === 'closed') forget();
         },
         onError: (error) =>
-          setRefused(error instanceof ApiError && error.status !== 0 ? error.message : t.couldNotSave),
+          setRefused(error instanceof ApiError && error.status !== 0 ? failureText(error) : t.couldNotSave),
       },
     );
   };

@@ -6,6 +6,7 @@ import { ProblemFigure } from '../../figures/problem-figure.tsx';
 import { practiceMessages } from '../../i18n/practice.ts';
 import { shellMessages } from '../../i18n/shell.ts';
 import { LabelPanel } from '../../ui/label-panel.tsx';
+import { Failure } from '../../ui/failure.tsx';
 import { Loading } from '../../ui/loading.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
@@ -73,7 +74,7 @@ export function ProblemWork({
 }) {
   const shell = useStore(shellMessages);
   const { data: problem, error } = useQuery(problemQuery(problemId));
-  if (error) return <Notice tone="error">{error.message}</Notice>;
+  if (error) return <Failure error={error} />;
   if (!problem) return <Loading />;
   const beside = !compact && problem.label !== null;
   return (

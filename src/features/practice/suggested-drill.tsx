@@ -3,7 +3,7 @@ import type { LevelView } from '../../../shared/contracts/practice.ts';
 import { todayMessages } from '../../i18n/today.ts';
 import { topicMessages } from '../../i18n/words.ts';
 import { Button, ButtonLink } from '../../ui/button.tsx';
-import { Notice } from '../../ui/notice.tsx';
+import { Failure } from '../../ui/failure.tsx';
 import { useNewDrill } from './queries.ts';
 import { suggestDrill } from './suggest.ts';
 
@@ -32,11 +32,7 @@ export function SuggestedDrill({
       <p className="mt-2 mb-4 max-w-[34rem] font-serif">
         {t.suggestText({ topics })} {suggestion.why === 'new' ? t.suggestWhyNew : t.suggestWhyLow}
       </p>
-      {make.error && (
-        <Notice tone="error" className="mb-3">
-          {make.error.message}
-        </Notice>
-      )}
+      <Failure error={make.error} />
       <div className="flex flex-wrap items-center gap-x-5 gap-y-2">
         <Button onClick={begin} disabled={make.isPending}>
           {t.start}

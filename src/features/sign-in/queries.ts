@@ -1,38 +1,25 @@
 import { useMutation } from '@tanstack/react-query';
-import type { SessionView } from '../../../shared/contracts/account.ts';
 import type { ResetPasswordBody, SignInBody, SignUpBody } from '../../../shared/contracts/auth.ts';
-import { locale } from '../../i18n/i18n.ts';
 import { api } from '../../lib/api.ts';
-import { queryClient } from '../../lib/query-client.ts';
-import { sessionQuery, useSessionChange } from '../../lib/session.ts';
-
-/** Someone else may be here now: ask who, and speak their language. */
-function useArrival(): () => Promise<void> {
-  const changed = useSessionChange();
-  return async () => {
-    await changed();
-    const session = queryClient.getQueryData<SessionView>(sessionQuery.queryKey);
-    if (session?.me) locale.set(session.me.language);
-  };
-}
+import { useSessionChange } from '../../lib/session.ts';
 
 export function useSignUp() {
   return useMutation({ mutationFn: (body: SignUpBody) => api('POST', '/api/auth/sign-up/email', body) });
 }
 
 export function useSignIn() {
-  const arrive = useArrival();
+  const changed = useSessionChange();
   return useMutation({
     mutationFn: (body: SignInBody) => api('POST', '/api/auth/sign-in/email', body),
-    onSuccess: arrive,
+    onSuccess: changed,
   });
 }
 
 export function useConfirm() {
-  const arrive = useArrival();
+  const changed = useSessionChange();
   return useMutation({
     mutationFn: (token: string) => api('GET', `/api/auth/verify-email?token=${encodeURIComponent(token)}`),
-    onSuccess: arrive,
+    onSuccess: changed,
   });
 }
 

@@ -1,13 +1,12 @@
 import { useStore } from '@nanostores/react';
 import { useQuery } from '@tanstack/react-query';
-import { useCallback, useMemo } from 'react';
+import { lazy, Suspense, useCallback, useMemo } from 'react';
 import { useParams } from 'react-router';
 import type { CheckpointPlace } from '../../features/lessons/lesson-context.ts';
 import { LessonSheet } from '../../features/lessons/lesson-sheet.tsx';
 import { findLesson } from '../../features/lessons/lesson-text.ts';
 import { placeOf } from '../../features/lessons/modules.ts';
 import { lessonsQuery } from '../../features/lessons/queries.ts';
-import { CheckpointWork } from '../../features/practice/checkpoint-work.tsx';
 import { useLocale } from '../../i18n/i18n.ts';
 import { lessonMessages } from '../../i18n/lessons.ts';
 import { shellMessages } from '../../i18n/shell.ts';
@@ -18,6 +17,10 @@ import { Loading } from '../../ui/loading.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { PageHeading } from '../../ui/page.tsx';
 import { NotFound } from '../not-found.tsx';
+
+const CheckpointWork = lazy(async () => ({
+  default: (await import('../../features/practice/checkpoint-work.tsx')).CheckpointWork,
+}));
 
 /** A lesson at its own address. */
 export default function Lesson() {
@@ -32,7 +35,9 @@ export default function Lesson() {
   const found = useMemo(() => (topic ? findLesson(locale, topic, slug) : null), [locale, topic, slug]);
   const renderCheckpoint = useCallback(
     ({ id, family, tier }: CheckpointPlace, onDone: (checkpoint: string) => void) => (
-      <CheckpointWork lesson={slug} checkpoint={id} family={family} tier={tier} onDone={onDone} />
+      <Suspense fallback={<Loading />}>
+        <CheckpointWork lesson={slug} checkpoint={id} family={family} tier={tier} onDone={onDone} />
+      </Suspense>
     ),
     [slug],
   );

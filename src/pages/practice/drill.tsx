@@ -9,7 +9,6 @@ import { drillMessages } from '../../i18n/drills.ts';
 import { topicMessages } from '../../i18n/words.ts';
 import { paths } from '../../paths.ts';
 import { Loading } from '../../ui/loading.tsx';
-import { Notice } from '../../ui/notice.tsx';
 import { PageHeading } from '../../ui/page.tsx';
 
 /** A drill's own address: goes on to the problem in hand, or shows how it went. */
@@ -28,7 +27,7 @@ export default function Drill() {
     next.mutate(undefined, { onSuccess: (problem) => void navigate(paths.problem(problem.id), { replace: true }) });
   }, [isOpen, next, navigate]);
   if (error) throw error;
-  if (next.error) return <Notice tone="error">{next.error.message}</Notice>;
+  if (next.error) throw next.error;
   if (!drill || isOpen) return <Loading />;
   return (
     <>

@@ -20,7 +20,7 @@ export default function Drills() {
   const levels = useQuery(levelsQuery);
   const drills = useQuery(drillsQuery);
   const error = levels.error ?? drills.error;
-  if (error) return <Notice tone="error">{error.message}</Notice>;
+  if (error) throw error;
   if (!levels.data || !drills.data) return <Loading />;
   return (
     <>

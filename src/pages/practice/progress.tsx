@@ -8,14 +8,13 @@ import { progressMessages } from '../../i18n/progress.ts';
 import { paths } from '../../paths.ts';
 import { ButtonLink } from '../../ui/button.tsx';
 import { Loading } from '../../ui/loading.tsx';
-import { Notice } from '../../ui/notice.tsx';
 import { PageHeading } from '../../ui/page.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
 
 export default function Progress() {
   const t = useStore(progressMessages);
   const { data, error } = useQuery(progressQuery);
-  if (error) return <Notice tone="error">{error.message}</Notice>;
+  if (error) throw error;
   if (!data) return <Loading />;
   if (data.answered === 0) {
     return (

@@ -12,7 +12,6 @@ import { useMe } from '../../lib/session.ts';
 import { paths } from '../../paths.ts';
 import { ButtonLink } from '../../ui/button.tsx';
 import { Loading } from '../../ui/loading.tsx';
-import { Notice } from '../../ui/notice.tsx';
 import { PageHeading } from '../../ui/page.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
 
@@ -35,7 +34,7 @@ export default function Today() {
   const levels = useQuery(levelsQuery);
   const drills = useQuery(drillsQuery);
   const lessons = useQuery(lessonsQuery).data ?? [];
-  if (levels.error) return <Notice tone="error">{levels.error.message}</Notice>;
+  if (levels.error) throw levels.error;
   if (!levels.data || !drills.data) return <Loading />;
   const first = lessons.find((lesson) => lesson.topic === 'area') ?? lessons[0];
   const isNew = levels.data.every((level) => level.answers === 0);
