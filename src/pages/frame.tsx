@@ -14,7 +14,7 @@ import { Mark } from '../ui/mark.tsx';
 import { Broken, PageBoundary } from './broken.tsx';
 
 const railLink =
-  'flex min-h-11 items-center justify-center border-t-[3px] border-transparent px-2 text-sm font-medium text-ink no-underline wide:justify-start wide:border-t-0 wide:border-l-[3px] wide:px-2.5 wide:text-base aria-[current=page]:border-dye aria-[current=page]:bg-dye-wash aria-[current=page]:font-bold';
+  'flex min-h-11 items-center justify-center border-t-[3px] border-transparent px-1 text-[0.8125rem] font-medium text-ink no-underline wide:justify-start wide:border-t-0 wide:border-l-[3px] wide:px-2.5 wide:text-base aria-[current=page]:border-dye aria-[current=page]:bg-dye-wash aria-[current=page]:font-bold';
 
 function Rail({ me, mailbox }: { me: MeView; mailbox: boolean }) {
   const t = useStore(shellMessages);
@@ -78,7 +78,7 @@ function OtherLanguage() {
 function Top({ mailbox }: { mailbox: boolean }) {
   const t = useStore(shellMessages);
   return (
-    <div className="mx-auto flex w-full max-w-[72rem] items-center gap-4 px-4 py-4 wide:px-8">
+    <header className="no-print mx-auto flex w-full max-w-[72rem] flex-wrap items-center gap-x-3 px-4 py-4 wide:gap-x-4 wide:px-8">
       <Link
         to={paths.welcome}
         aria-label={t.welcome}
@@ -93,8 +93,10 @@ function Top({ mailbox }: { mailbox: boolean }) {
         </Link>
       )}
       <OtherLanguage />
-      <ButtonLink to={paths.signIn}>{t.signIn}</ButtonLink>
-    </div>
+      <ButtonLink to={paths.signIn} className="max-wide:px-3 whitespace-nowrap">
+        {t.signIn}
+      </ButtonLink>
+    </header>
   );
 }
 

@@ -43,7 +43,7 @@ function ModuleSection({ module, canDrill, lessonAt, drillAt }: { module: Module
     <section aria-labelledby={`module-${topic}`} className={`border border-rule ${empty ? '' : 'bg-sheet'}`}>
       <div className="flex flex-wrap items-baseline gap-x-4 gap-y-0.5 px-4 py-2.5 wide:px-6">
         <h2 id={`module-${topic}`} className="mr-auto text-[1.15rem]">
-          <span className="mr-2 font-sans text-sm font-semibold tracking-normal text-ink-soft">
+          <span className="mr-2 block font-sans text-sm font-semibold tracking-normal text-ink-soft wide:inline">
             {t.module({ number })}
           </span>
           <span className="inline-block">{names[topic]}</span>

@@ -9,6 +9,8 @@ export interface CheckpointPlace {
 
 interface LessonContextValue {
   slug: string;
+  /** Names of its checkpoints, in the order of the text. */
+  checkpoints: readonly string[];
   /** Draws the problem of a checkpoint; given by the page, since problems are another feature's. */
   renderCheckpoint: (place: CheckpointPlace) => ReactNode;
 }

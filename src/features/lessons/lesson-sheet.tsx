@@ -1,5 +1,6 @@
 import { useStore } from '@nanostores/react';
-import { Suspense, useCallback, useEffect, useMemo, useState, type ReactNode } from 'react';
+import { useQuery } from '@tanstack/react-query';
+import { useCallback, useMemo, useState, type ReactNode } from 'react';
 import 'katex/dist/katex.min.css';
 import type { LessonSummary } from '../../../shared/contracts/lessons.ts';
 import { useLocale } from '../../i18n/i18n.ts';
@@ -10,7 +11,7 @@ import { Notice } from '../../ui/notice.tsx';
 import { lessonParts } from './components/lesson-parts.tsx';
 import { LessonProvider, type CheckpointPlace } from './lesson-context.ts';
 import { LessonEnd, LessonSources } from './lesson-foot.tsx';
-import { lessonComponent, type FoundLesson, type LessonModule } from './lesson-text.ts';
+import { lessonTextQuery, type FoundLesson } from './lesson-text.ts';
 import { useReadingPlace } from './reading-place.ts';
 import { useSaveProgress } from './queries.ts';
 
@@ -47,9 +48,8 @@ interface LessonSheetProps {
 export function LessonSheet({ lesson, found, renderCheckpoint }: LessonSheetProps) {
   const t = useStore(lessonMessages);
   const locale = useLocale();
-  const { slug } = lesson;
-  const Text = lessonComponent(found, `${found.locale}/${slug}`);
-  const [front, setFront] = useState<LessonModule['frontmatter']>({});
+  const { slug, checkpoints } = lesson;
+  const { data: read, error } = useQuery(lessonTextQuery(found, slug));
   const [done, setDone] = useState<readonly string[]>([]);
   const [came] = useState(lesson.progress);
   const save = useSaveProgress(slug).mutate;
@@ -59,16 +59,11 @@ export function LessonSheet({ lesson, found, renderCheckpoint }: LessonSheetProp
     [],
   );
   const context = useMemo(
-    () => ({ slug, renderCheckpoint: (place: CheckpointPlace) => renderCheckpoint(place, markDone) }),
-    [slug, renderCheckpoint, markDone],
+    () => ({ slug, checkpoints, renderCheckpoint: (place: CheckpointPlace) => renderCheckpoint(place, markDone) }),
+    [slug, checkpoints, renderCheckpoint, markDone],
   );
-  useEffect(() => {
-    let here = true;
-    void found.load().then((module) => here && setFront(module.frontmatter));
-    return () => {
-      here = false;
-    };
-  }, [found]);
+  if (error) throw error;
+  if (!read) return <Loading />;
   return (
     <>
       {came?.state === 'reading' && came.position > begun && (
@@ -81,13 +76,11 @@ export function LessonSheet({ lesson, found, renderCheckpoint }: LessonSheetProp
       )}
       <LessonProvider value={context}>
         <article ref={text} lang={found.locale} className="lesson">
-          <Suspense fallback={<Loading />}>
-            <Text components={lessonParts} />
-          </Suspense>
+          {read.default({ components: lessonParts })}
         </article>
       </LessonProvider>
       <LessonEnd lesson={lesson} done={done.length} />
-      <LessonSources front={front} />
+      <LessonSources front={read.frontmatter} />
     </>
   );
 }

@@ -10,7 +10,7 @@ import { useLesson, type CheckpointPlace } from '../lesson-context.ts';
  */
 export function Checkpoint(place: CheckpointPlace) {
   const t = useStore(lessonMessages);
-  const { renderCheckpoint } = useLesson();
+  const { checkpoints, renderCheckpoint } = useLesson();
   const heading = `checkpoint-${place.id}`;
   const section = useRef<HTMLElement>(null);
   const [isNear, setNear] = useState(false);
@@ -28,7 +28,7 @@ export function Checkpoint(place: CheckpointPlace) {
   return (
     <section ref={section} aria-labelledby={heading} className="not-prose my-8 font-sans" data-checkpoint={place.id}>
       <h2 id={heading} className="mb-2 text-[1.05rem]">
-        {t.checkpoint}
+        {t.checkpointOf({ number: checkpoints.indexOf(place.id) + 1, count: String(checkpoints.length) })}
       </h2>
       {isNear ? renderCheckpoint(place) : <Loading />}
     </section>
