@@ -6,7 +6,7 @@ export const welcomeMessages = i18n('welcome', {
   lead: 'Lessons and fresh problems for the pesticide applicator exam, for landscape and grounds crews. When an answer is wrong, Tankmark tells you which mistake it was.',
   create: 'Create an account',
   toToday: 'Go to Today',
-  haveAccount: 'I have an account',
+  workNow: 'Work a problem now',
   sampleTitle: 'Work one now',
   sampleHelp: 'No account needed. Nothing you enter here is kept.',
   another: 'Another problem',

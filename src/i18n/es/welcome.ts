@@ -4,7 +4,7 @@ export const es = {
   lead: 'Lecciones y problemas nuevos para el examen de aplicador de pesticidas, para cuadrillas de jardines y áreas verdes. Cuando una respuesta está mal, Tankmark le dice cuál fue el error.',
   create: 'Crear una cuenta',
   toToday: 'Ir a Hoy',
-  haveAccount: 'Ya tengo cuenta',
+  workNow: 'Resolver un problema ahora',
   sampleTitle: 'Haga uno ahora',
   sampleHelp: 'Sin cuenta. Nada de lo que escriba aquí se guarda.',
   another: 'Otro problema',

@@ -1,9 +1,10 @@
 import { useStore } from '@nanostores/react';
+import { useRef } from 'react';
 import { SampleWork } from '../../features/practice/sample-work.tsx';
 import { welcomeMessages } from '../../i18n/welcome.ts';
 import { useMe } from '../../lib/session.ts';
 import { paths } from '../../paths.ts';
-import { ButtonLink } from '../../ui/button.tsx';
+import { Button, ButtonLink } from '../../ui/button.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { useDocumentTitle } from '../../ui/page.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
@@ -28,6 +29,11 @@ function Columns({ parts }: { parts: readonly (readonly [title: string, text: st
 export default function Welcome() {
   const t = useStore(welcomeMessages);
   const me = useMe();
+  const sample = useRef<HTMLDivElement>(null);
+  const workNow = () => {
+    sample.current?.scrollIntoView({ block: 'start', behavior: 'smooth' });
+    sample.current?.querySelector('input')?.focus({ preventScroll: true });
+  };
   useDocumentTitle(t.documentTitle);
   return (
     <>
@@ -40,9 +46,9 @@ export default function Welcome() {
               <ButtonLink to={paths.today}>{t.toToday}</ButtonLink>
             ) : (
               <>
-                <ButtonLink to={paths.signUp}>{t.create}</ButtonLink>
-                <ButtonLink to={paths.signIn} look="quiet">
-                  {t.haveAccount}
+                <Button onClick={workNow}>{t.workNow}</Button>
+                <ButtonLink to={paths.signUp} look="quiet">
+                  {t.create}
                 </ButtonLink>
               </>
             )}
@@ -51,7 +57,9 @@ export default function Welcome() {
         <Sheet graduated aria-labelledby="sample">
           <h2 id="sample">{t.sampleTitle}</h2>
           <p className="mb-3 text-sm text-ink-soft">{t.sampleHelp}</p>
-          <SampleWork />
+          <div ref={sample}>
+            <SampleWork />
+          </div>
         </Sheet>
       </div>
       <section className="border-t-2 border-ink pt-2" aria-labelledby="what">
