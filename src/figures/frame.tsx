@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 
-/** Width of every drawing in its own units; text of 15 units stays above 12 px down to a 300 px wide column. */
-export const drawingWidth = 420;
+/** Width of every drawing in its own units; text of 15 units stays at 12 px or more in a column of 285 px, that of the narrowest phone. */
+export const drawingWidth = 350;
 
 /** The paper of a drawing: as wide as its column up to 30rem, its text equivalent read by screen readers. */
 export function DrawingFrame({ height, alt, children }: { height: number; alt: string; children: ReactNode }) {
@@ -10,7 +10,7 @@ export function DrawingFrame({ height, alt, children }: { height: number; alt: s
       viewBox={`0 0 ${drawingWidth} ${Math.ceil(height)}`}
       role="img"
       aria-label={alt}
-      className="block h-auto w-full max-w-[30rem] font-sans text-ink"
+      className="block h-auto w-full max-w-[25rem] font-sans text-ink"
       fontSize="15"
       fill="currentColor"
     >

@@ -1,6 +1,7 @@
 import type { PlanArrow, PlanDimension, PlanFigure, PlanShape, Point } from '../../shared/contracts/figure.ts';
 import { DrawingFrame, drawingWidth, textWidth } from './frame.tsx';
 import { groundFill, isHatched, useHatching } from './grounds.tsx';
+import { namePlaces } from './name-places.ts';
 import { dimensionGap, outward, planLayout, type PlanLayout } from './plan-layout.ts';
 
 /** Text on a plate of the paper's own color, kept inside the drawing. */
@@ -15,14 +16,6 @@ function Plate({ at, text, bold = false }: { at: Point; text: string; bold?: boo
       </text>
     </g>
   );
-}
-
-function middle(shape: PlanShape<string>): Point {
-  if (shape.form === 'rect') return [shape.x + shape.width / 2, shape.y + shape.height / 2];
-  if (shape.form === 'circle') return [shape.x, shape.y];
-  if (shape.nameAt) return shape.nameAt;
-  const n = shape.points.length || 1;
-  return [shape.points.reduce((sum, [x]) => sum + x, 0) / n, shape.points.reduce((sum, [, y]) => sum + y, 0) / n];
 }
 
 function Outline({
@@ -46,14 +39,6 @@ function Outline({
   }
   const [x, y] = layout.at([shape.x, shape.y]);
   return <rect x={x} y={y} width={shape.width * layout.scale} height={shape.height * layout.scale} {...look} />;
-}
-
-/** Room for a name in a shape, in the drawing's units. */
-function roomFor(shape: PlanShape<string>, layout: PlanLayout): number {
-  if (shape.form === 'rect') return Math.min(shape.width * layout.scale, (shape.height * layout.scale) / 0.02);
-  if (shape.form === 'circle') return shape.radius * 2 * layout.scale;
-  const xs = shape.points.map(([x]) => x);
-  return (Math.max(...xs) - Math.min(...xs)) * layout.scale;
 }
 
 function Dimension({ dimension, layout }: { dimension: PlanDimension<string>; layout: PlanLayout }) {
@@ -100,11 +85,12 @@ function Arrow({ arrow, layout }: { arrow: PlanArrow<string>; layout: PlanLayout
 export function PlanDrawing({ figure }: { figure: PlanFigure }) {
   const layout = planLayout(figure);
   const hatching = useHatching();
+  const names = namePlaces(figure.shapes, layout);
   return (
     <DrawingFrame height={layout.height} alt={figure.alt}>
       {hatching.defs}
-      {figure.shapes.map((shape, index) => (
-        <g key={index}>
+      {figure.shapes.map((shape) => (
+        <g key={JSON.stringify(shape)}>
           <Outline shape={shape} layout={layout} className={groundFill[shape.ground]} />
           <Outline
             shape={shape}
@@ -114,16 +100,15 @@ export function PlanDrawing({ figure }: { figure: PlanFigure }) {
           />
         </g>
       ))}
-      {figure.shapes.map((shape, index) =>
-        shape.name !== undefined && roomFor(shape, layout) >= textWidth(shape.name) ? (
-          <Plate key={index} at={layout.at(middle(shape))} text={shape.name} bold />
-        ) : null,
-      )}
-      {figure.arrows?.map((arrow, index) => (
-        <Arrow key={index} arrow={arrow} layout={layout} />
+      {names.map((at, index) => {
+        const name = figure.shapes[index]?.name;
+        return at && name !== undefined ? <Plate key={`${name} ${at.join(' ')}`} at={at} text={name} bold /> : null;
+      })}
+      {figure.arrows?.map((arrow) => (
+        <Arrow key={JSON.stringify(arrow)} arrow={arrow} layout={layout} />
       ))}
-      {figure.dimensions.map((dimension, index) => (
-        <Dimension key={index} dimension={dimension} layout={layout} />
+      {figure.dimensions.map((dimension) => (
+        <Dimension key={JSON.stringify(dimension)} dimension={dimension} layout={layout} />
       ))}
     </DrawingFrame>
   );

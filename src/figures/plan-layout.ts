@@ -13,7 +13,7 @@ export interface PlanLayout {
 /** Distance of an outside dimension line from its edge. */
 export const dimensionGap = 16;
 const smallestMargin = 14;
-const mostHeight = 340;
+const mostHeight = 290;
 
 /** Which way a dimension is pushed: the side of the line from `from` to `to`, y pointing down. */
 export function outward({ from, to, side }: PlanDimension<string>): Point {

@@ -15,6 +15,7 @@ export const practiceMessages = i18n('practice', {
   keys: 'Signs that phone keypads lack',
   check: params('Check ({part})'),
   checkOne: 'Check',
+  checkOne: 'Check',
   checking: 'Checking …',
   notSaved: 'Not saved yet. Trying again …',
   couldNotSave: 'The server cannot be reached. Your answer is kept here: press Check again when you are connected.',
@@ -38,6 +39,6 @@ export const practiceMessages = i18n('practice', {
   moveUp: params('Move up: {step}'),
   moveDown: params('Move down: {step}'),
   moved: params('{step} is now step {place} of {count}.'),
-  order: 'Put the steps in order, first step on top.',
+  order: 'First step on top. Move a step with its arrows.',
   whole: params('How many {thing}?'),
 });

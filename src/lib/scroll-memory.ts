@@ -1,5 +1,5 @@
 import { useEffect } from 'react';
-import { useLocation, useNavigationType } from 'react-router';
+import { NavigationType, useLocation, useNavigationType } from 'react-router';
 
 const places = new Map<string, number>();
 const mostWaitMs = 2_000;
@@ -15,7 +15,7 @@ export function useScrollMemory(): void {
     return () => window.removeEventListener('scroll', remember);
   }, [key]);
   useEffect(() => {
-    const wanted = kind === 'POP' ? (places.get(key) ?? 0) : 0;
+    const wanted = kind === NavigationType.Pop ? (places.get(key) ?? 0) : 0;
     if (wanted === 0) {
       window.scrollTo(0, 0);
       return undefined;
@@ -29,6 +29,6 @@ export function useScrollMemory(): void {
     come();
     return () => cancelAnimationFrame(frame);
     // A change of the query alone is the same page: it stays where it is.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
+    // oxlint-disable-next-line react/exhaustive-deps
   }, [pathname]);
 }

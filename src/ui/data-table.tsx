@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { ScrollBox } from './scroll-box.tsx';
 
 export interface Column<Row> {
   key: string;
@@ -18,7 +19,7 @@ export function DataTable<Row>(props: {
 }) {
   const { caption, columns, rows, rowKey, captionShown = false } = props;
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="group" aria-label={caption}>
+    <ScrollBox label={caption}>
       <table className="w-full border-collapse">
         <caption className={captionShown ? 'mb-2 text-left font-serif text-lg font-semibold' : 'sr-only'}>
           {caption}
@@ -55,6 +56,6 @@ export function DataTable<Row>(props: {
           ))}
         </tbody>
       </table>
-    </div>
+    </ScrollBox>
   );
 }

@@ -15,7 +15,7 @@ export function LabelPanel({ label }: { label: LabelView }) {
           <span className="block text-xs text-ink-soft">{label.number}</span>
         </p>
       </header>
-      <dl className="grid grid-cols-[minmax(5.5rem,auto)_1fr] gap-x-3 gap-y-1 px-3 pt-2 pb-3">
+      <dl className="grid grid-cols-[minmax(0,6.75rem)_1fr] gap-x-3 gap-y-1 px-3 pt-2 pb-3">
         {label.rows.map(({ heading, text }) => (
           <div key={`${heading}${text}`} className="contents">
             <dt className="font-bold">{heading}</dt>

@@ -3,9 +3,5 @@ import { shellMessages } from '../i18n/shell.ts';
 
 export function Loading() {
   const { loading } = useStore(shellMessages);
-  return (
-    <p role="status" className="py-8 text-ink-soft">
-      {loading} …
-    </p>
-  );
+  return <output className="block py-8 text-ink-soft">{loading} …</output>;
 }

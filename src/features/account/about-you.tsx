@@ -40,9 +40,7 @@ export function AboutYou({ me }: { me: MeView }) {
         <Button type="submit" disabled={change.isPending}>
           {t.save}
         </Button>
-        <p role="status" className="font-semibold text-turf">
-          {change.isSuccess && t.saved}
-        </p>
+        <output className="block font-semibold text-turf">{change.isSuccess && t.saved}</output>
       </div>
     </form>
   );

@@ -40,7 +40,7 @@ export function PasswordForm() {
         {t.endOthers}
       </label>
       <Failure error={change.error} className="" />
-      <div role="status">{change.isSuccess && <Notice tone="good">{t.passwordChanged}</Notice>}</div>
+      <output className="block">{change.isSuccess && <Notice tone="good">{t.passwordChanged}</Notice>}</output>
       <Button type="submit" look="quiet" disabled={change.isPending} className="justify-self-start">
         {t.changePassword}
       </Button>

@@ -7,6 +7,17 @@ import { topicMessages } from '../../i18n/words.ts';
 import { DataTable } from '../../ui/data-table.tsx';
 import { Field } from '../../ui/field.tsx';
 
+function nameCell({ key, title, to }: { key: string; title: string; to: string }) {
+  return (
+    <>
+      <Link to={to} className="inline-flex min-h-6 items-center">
+        {title}
+      </Link>
+      <span className="block text-sm font-normal text-ink-soft">{key}</span>
+    </>
+  );
+}
+
 /** Every family by topic, narrowed by a few letters of its name. */
 export function FamilyTable({
   families,
@@ -25,9 +36,9 @@ export function FamilyTable({
   return (
     <>
       <Field label={t.find} type="search" value={wanted} onChange={(event) => setWanted(event.target.value)} />
-      <p role="status" className="mt-2 mb-3 text-sm text-ink-soft">
+      <output className="block mt-2 mb-3 text-sm text-ink-soft">
         {shown.length === 0 ? t.none : t.found(shown.length)}
-      </p>
+      </output>
       <DataTable
         caption={t.table}
         rows={shown}
@@ -36,14 +47,7 @@ export function FamilyTable({
           {
             key: 'family',
             head: t.family,
-            cell: ({ key, title }) => (
-              <>
-                <Link to={linkTo(key)} className="inline-flex min-h-6 items-center">
-                  {title}
-                </Link>
-                <span className="block text-sm font-normal text-ink-soft">{key}</span>
-              </>
-            ),
+            cell: ({ key, title }) => nameCell({ key, title, to: linkTo(key) }),
           },
           { key: 'topic', head: t.topic, cell: ({ topic }) => topics[topic] },
           { key: 'tiers', head: t.tiers, number: true, cell: ({ tiers }) => tiers.join(', ') },

@@ -1,6 +1,7 @@
+import { queryOptions } from '@tanstack/react-query';
 import type { MDXContent } from 'mdx/types';
-import { lazy } from 'react';
-import type { Locale, Topic } from '../../../shared/vocabulary.ts';
+
+import type { Locale } from '../../../shared/vocabulary.ts';
 
 /** What a lesson's file exports: its text, and of its front matter what stands at the foot. */
 export interface LessonModule {
@@ -14,7 +15,7 @@ export interface LessonModule {
 // Each lesson is its own file in the build, fetched when it is opened.
 const files = import.meta.glob<LessonModule>('../../../content/lessons/*/*/*.mdx');
 
-function fileOf(locale: Locale, topic: Topic, slug: string): (() => Promise<LessonModule>) | null {
+function fileOf(locale: Locale, topic: string, slug: string): (() => Promise<LessonModule>) | null {
   const folder = `/content/lessons/${locale}/${topic}/`;
   const path = Object.keys(files).find(
     (name) => name.includes(folder) && name.replace(/^.*\/\d+-/, '') === `${slug}.mdx`,
@@ -29,20 +30,18 @@ export interface FoundLesson {
 }
 
 /** Finds a lesson's text in the reader's language, or in English. */
-export function findLesson(locale: Locale, topic: Topic, slug: string): FoundLesson | null {
+export function findLesson(locale: Locale, topic: string, slug: string): FoundLesson | null {
   const own = fileOf(locale, topic, slug);
   if (own) return { load: own, locale };
   const english = fileOf('en', topic, slug);
   return english && { load: english, locale: 'en' };
 }
 
-const texts = new Map<string, ReturnType<typeof lazy<LessonModule['default']>>>();
-
-/** The lesson as a component, made once for each file. */
-export function lessonComponent(found: FoundLesson, key: string) {
-  const known = texts.get(key);
-  if (known) return known;
-  const made = lazy(async () => ({ default: (await found.load()).default }));
-  texts.set(key, made);
-  return made;
-}
+/** A lesson's text, fetched once. What its file exports is code, so it is neither compared nor fetched anew. */
+export const lessonTextQuery = ({ load, locale }: FoundLesson, slug: string) =>
+  queryOptions({
+    queryKey: ['lesson-text', locale, slug],
+    queryFn: load,
+    staleTime: Infinity,
+    structuralSharing: false,
+  });

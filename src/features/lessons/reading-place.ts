@@ -12,7 +12,9 @@ export function placeIn(text: Pick<DOMRect, 'top' | 'height'>, windowHeight: num
 export function useReadingPlace(onPlace: (place: number) => void) {
   const text = useRef<HTMLElement>(null);
   const tell = useRef(onPlace);
-  tell.current = onPlace;
+  useEffect(() => {
+    tell.current = onPlace;
+  }, [onPlace]);
   useEffect(() => {
     let timer: number | undefined;
     let last = -1;

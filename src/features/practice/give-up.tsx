@@ -17,7 +17,7 @@ export function GiveUp({ problemId }: { problemId: string }) {
     );
   }
   return (
-    <div role="group" aria-label={t.giveUp} className="w-full border-l-4 border-brass bg-brass-wash p-3">
+    <section aria-label={t.giveUp} className="w-full border-l-4 border-brass bg-brass-wash p-3">
       <p className="mb-2">{t.giveUpAsk}</p>
       <div className="flex flex-wrap gap-3">
         <Button look="quiet" disabled={giveUp.isPending} onClick={() => giveUp.mutate()}>
@@ -27,6 +27,6 @@ export function GiveUp({ problemId }: { problemId: string }) {
           {t.giveUpNo}
         </Button>
       </div>
-    </div>
+    </section>
   );
 }

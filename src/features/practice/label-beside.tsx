@@ -6,7 +6,7 @@ import { Button } from '../../ui/button.tsx';
 import { LabelPanel } from '../../ui/label-panel.tsx';
 
 /** On phones the label stands above the parts, folded at a press, and slides over the page while one answers. */
-export function LabelOnPhone({ label }: { label: LabelView }) {
+export function LabelOnPhone({ label, floating }: { label: LabelView; floating: boolean }) {
   const t = useStore(practiceMessages);
   const sheet = useRef<HTMLDialogElement>(null);
   return (
@@ -17,16 +17,18 @@ export function LabelOnPhone({ label }: { label: LabelView }) {
         </summary>
         <LabelPanel label={label} />
       </details>
-      <div className="fixed right-3 bottom-[4.75rem] z-10">
+      {floating && (
+        <div className="fixed right-3 bottom-[4.75rem] z-10">
         <Button look="quiet" className="bg-sheet shadow-md" onClick={() => sheet.current?.showModal()}>
           {t.showLabel}
         </Button>
-      </div>
+        </div>
+      )}
       <dialog
         ref={sheet}
         aria-label={t.label}
         className="fixed inset-x-0 top-auto bottom-0 m-0 max-h-[85vh] w-full max-w-none overflow-y-auto bg-tank p-3 text-ink backdrop:bg-black/50"
-        onClick={(event) => event.target === sheet.current && sheet.current.close()}
+        {...{ closedby: 'any' }}
       >
         <LabelPanel label={label} />
         <Button className="mt-3 w-full" onClick={() => sheet.current?.close()}>

@@ -10,6 +10,14 @@ function inHundred(share: number): number {
   return Math.round(share * 100);
 }
 
+function stateChip(state: LevelView['state'], word: string) {
+  return <Chip tone={levelTones[state]}>{word}</Chip>;
+}
+
+function soft(text: string) {
+  return <span className="text-ink-soft">{text}</span>;
+}
+
 /** Every topic's level with its likely range; blank where there are too few answers to say. */
 export function LevelTable({ levels }: { levels: readonly LevelView[] }) {
   const t = useStore(progressMessages);
@@ -25,7 +33,7 @@ export function LevelTable({ levels }: { levels: readonly LevelView[] }) {
         {
           key: 'state',
           head: t.state,
-          cell: (level) => <Chip tone={levelTones[level.state]}>{states[level.state]}</Chip>,
+          cell: ({ state }) => stateChip(state, states[state]),
         },
         {
           key: 'fill',
@@ -37,12 +45,8 @@ export function LevelTable({ levels }: { levels: readonly LevelView[] }) {
           key: 'range',
           head: t.range,
           number: true,
-          cell: (level) =>
-            level.range ? (
-              t.range2({ low: inHundred(level.range.low), high: inHundred(level.range.high) })
-            ) : (
-              <span className="text-ink-soft">{t.blank}</span>
-            ),
+          cell: ({ range }) =>
+            range ? t.range2({ low: inHundred(range.low), high: inHundred(range.high) }) : soft(t.blank),
         },
         { key: 'answers', head: t.answers, number: true, cell: (level) => level.answers },
       ]}

@@ -77,7 +77,7 @@ export function NumberField(props: NumberFieldProps) {
         </div>
         {props.children}
       </div>
-      <div role="group" aria-label={t.keys} className="mt-1.5 flex gap-1.5 wide:hidden">
+      <fieldset aria-label={t.keys} className="mt-1.5 flex gap-1.5 wide:hidden">
         {fractionKeys.map((sign) => (
           <button
             key={sign}
@@ -89,7 +89,7 @@ export function NumberField(props: NumberFieldProps) {
             {sign}
           </button>
         ))}
-      </div>
+      </fieldset>
       {error !== null && (
         <p id={`${id}-error`} role="alert" className="mt-1.5 font-semibold text-clay">
           {error}

@@ -89,9 +89,7 @@ export function OrderField(props: {
           </li>
         ))}
       </ol>
-      <p role="status" className="sr-only">
-        {said}
-      </p>
+      <output className="sr-only">{said}</output>
     </div>
   );
 }

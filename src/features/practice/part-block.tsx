@@ -14,7 +14,10 @@ import { useAnswer } from './queries.ts';
 
 /** Seconds since the part came in front of the person, or since the last answer to it. */
 function useSeconds(): () => number {
-  const since = useRef(Date.now());
+  const since = useRef(0);
+  useEffect(() => {
+    since.current = Date.now();
+  }, []);
   return () => {
     const seconds = Math.round((Date.now() - since.current) / 1000);
     since.current = Date.now();
@@ -79,7 +82,7 @@ export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
   };
   const button = closed ? null : (
     <Button type="submit" disabled={answer.isPending}>
-      {answer.isPending ? t.checking : t.check({ part: part.key })}
+      {answer.isPending ? t.checking : lettered ? t.check({ part: part.key }) : t.checkOne}
     </Button>
   );
   return (
@@ -129,13 +132,11 @@ export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
           )}
         </>
       )}
-      {waiting && (
-        <p role="status" className="mt-2 text-sm text-brass">
-          {t.notSaved}
-        </p>
-      )}
+      {waiting && <output className="block mt-2 text-sm text-brass">{t.notSaved}</output>}
       <div aria-live="polite">
         {part.attempts.map((attempt, index) => (
+          // Attempts are only ever added: their place is who they are.
+          // oxlint-disable-next-line react/no-array-index-key
           <VerdictPanel key={index} attempt={attempt} ref={index === attempts - 1 ? verdict : undefined} />
         ))}
       </div>

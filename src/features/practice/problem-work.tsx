@@ -38,7 +38,7 @@ function Worksheet({ problem, compact, after }: { problem: ProblemView; compact:
     <Sheet graduated>
       <p className="mb-2 max-w-[38rem] font-serif text-[1.1rem] leading-normal">{problem.statement}</p>
       {problem.figure && <ProblemFigure figure={problem.figure} describe={t.describe} />}
-      {problem.label && !compact && <LabelOnPhone label={problem.label} />}
+      {problem.label && !compact && <LabelOnPhone label={problem.label} floating={problem.state === 'open'} />}
       {problem.label && compact && (
         <div className="mb-4 max-w-md">
           <LabelPanel label={problem.label} />
@@ -78,7 +78,7 @@ export function ProblemWork({
   if (!problem) return <Loading />;
   const beside = !compact && problem.label !== null;
   return (
-    <div className={beside ? 'grid gap-6 wide:grid-cols-[minmax(0,1fr)_20rem]' : ''}>
+    <div className={beside ? 'grid items-start gap-6 wide:grid-cols-[minmax(0,1fr)_20rem]' : ''}>
       <Worksheet problem={problem} compact={compact} after={after} />
       {!compact && (
         <aside className={beside ? '' : 'mt-4'}>

@@ -14,10 +14,10 @@ export function suggestDrill(levels: readonly LevelView[]): Suggestion | null {
     .filter((level) => level.state === 'filling' || level.state === 'top-up')
     .sort((a, b) => (a.fill ?? 0) - (b.fill ?? 0));
   // The arithmetic of measuring comes first for somebody new: everything else stands on it.
-  const first: Topic[] = ['area', 'units', 'rate'];
+  const first = new Set<Topic>(['area', 'units', 'rate']);
   const fresh = drillable
     .filter((level) => level.state === 'not-started')
-    .sort((a, b) => Number(first.includes(b.topic)) - Number(first.includes(a.topic)));
+    .sort((a, b) => Number(first.has(b.topic)) - Number(first.has(a.topic)));
   const chosen = low.length >= 2 ? low.slice(0, 2) : [...low, ...fresh].slice(0, 2);
   if (chosen.length === 0) return drillable[0] ? { topics: [drillable[0].topic], why: 'low' } : null;
   return { topics: chosen.map((level) => level.topic), why: low.length === 0 ? 'new' : 'low' };

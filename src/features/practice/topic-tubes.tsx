@@ -21,9 +21,9 @@ export function TopicTube({ level }: { level: LevelView }) {
   const small =
     figure ?? (level.tiers.length === 0 ? t.noProblems : level.answers > 0 ? t.answers(level.answers) : t.none);
   return (
-    <div className="flex items-end gap-2.5">
+    <div className="flex items-start gap-2.5">
       <SightTube level={level} />
-      <div className="min-w-0 pb-1">
+      <div className="min-w-0 pt-1">
         <p className="leading-tight font-semibold">{topics[level.topic]}</p>
         <p className="mt-1">
           <Chip tone={levelTones[level.state]}>{states[level.state]}</Chip>

@@ -33,7 +33,7 @@ export function AddressForm({ sends, email = '', button, sent }: AddressFormProp
         autoComplete="email"
       />
       <Failure error={send.error} className="" />
-      <div role="status">{send.isSuccess && <Notice tone="good">{sent}</Notice>}</div>
+      <output className="block">{send.isSuccess && <Notice tone="good">{sent}</Notice>}</output>
       <Button type="submit" disabled={send.isPending} className="justify-self-start">
         {button}
       </Button>

@@ -12,6 +12,7 @@ export const es = {
   keys: 'Signos que faltan en el teclado del teléfono',
   check: 'Revisar ({part})',
   checkOne: 'Revisar',
+  checkOne: 'Revisar',
   checking: 'Revisando …',
   notSaved: 'Todavía no se guardó. Intentando otra vez …',
   couldNotSave: 'No hay conexión con el servidor. Su respuesta queda aquí: pulse Revisar cuando tenga conexión.',
@@ -35,6 +36,6 @@ export const es = {
   moveUp: 'Subir: {step}',
   moveDown: 'Bajar: {step}',
   moved: '{step} es ahora el paso {place} de {count}.',
-  order: 'Ordene los pasos, el primero arriba.',
+  order: 'El primer paso arriba. Mueva un paso con sus flechas.',
   whole: '¿Cuántos? ({thing})',
 };

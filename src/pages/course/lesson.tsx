@@ -31,8 +31,7 @@ export default function Lesson() {
   const { topic: topicKey = '', slug = '' } = useParams();
   const { data: lessons, error } = useQuery(lessonsQuery);
   const place = lessons ? placeOf(lessons, topicKey, slug) : null;
-  const topic = place?.lesson.topic;
-  const found = useMemo(() => (topic ? findLesson(locale, topic, slug) : null), [locale, topic, slug]);
+  const found = useMemo(() => findLesson(locale, topicKey, slug), [locale, topicKey, slug]);
   const renderCheckpoint = useCallback(
     ({ id, family, tier }: CheckpointPlace, onDone: (checkpoint: string) => void) => (
       <Suspense fallback={<Loading />}>

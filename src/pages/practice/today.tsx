@@ -1,5 +1,6 @@
 import { useStore } from '@nanostores/react';
 import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
 import { useNavigate } from 'react-router';
 import { OpenLesson } from '../../features/lessons/open-lesson.tsx';
 import { lessonsQuery } from '../../features/lessons/queries.ts';
@@ -21,7 +22,7 @@ const evening = 18;
 function useGreeting(): string {
   const t = useStore(todayMessages);
   const name = useMe()?.name.split(' ')[0] ?? '';
-  const hour = new Date().getHours();
+  const [hour] = useState(() => new Date().getHours());
   if (hour < noon) return t.morning({ name });
   return hour < evening ? t.afternoon({ name }) : t.evening({ name });
 }

@@ -17,13 +17,13 @@ export default function Reset() {
       title={t.resetTitle}
       {...(done ? {} : { text: t.resetText, below: <Link to={paths.forgot}>{t.resetAgain}</Link> })}
     >
-      <div role="status">
+      <output className="block">
         {done && (
           <Notice tone="good" className="mb-4">
             {t.resetDone}
           </Notice>
         )}
-      </div>
+      </output>
       {done ? (
         <ButtonLink to={paths.signIn}>{t.toSignIn}</ButtonLink>
       ) : (

@@ -1,5 +1,8 @@
+import { useStore } from '@nanostores/react';
 import type { ComponentProps } from 'react';
 import { Link } from 'react-router';
+import { lessonMessages } from '../../../i18n/lessons.ts';
+import { ScrollBox } from '../../../ui/scroll-box.tsx';
 import { Checkpoint } from './checkpoint.tsx';
 
 /** Links inside the product stay in it; others open as links do. */
@@ -14,10 +17,11 @@ function Anchor({ href = '', children, ...rest }: ComponentProps<'a'>) {
 
 /** A wide table scrolls inside its own frame, never the page. */
 function Table(props: ComponentProps<'table'>) {
+  const { table } = useStore(lessonMessages);
   return (
-    <div className="my-5 overflow-x-auto" tabIndex={0} role="group">
+    <ScrollBox label={table} className="my-5">
       <table {...props} />
-    </div>
+    </ScrollBox>
   );
 }
 
