@@ -148,7 +148,7 @@ const rateSlips = slipsAt<Given>(['a', 'b', 'c'], ratePart, [
     answer: (g, earlier) => quantity(rate(g, earlier).value.mul(speedUsed(g, earlier).value), 'gal/acre'),
     message: () => ({
       en: 'You left out the speed. The faster the sprayer goes, the less an acre gets: divide by mph times inches.',
-      es: 'Le faltó la velocidad. Cuanto más rápido va el rociador, menos recibe un acre: divida entre mph por pulgadas.',
+      es: 'Le faltó la velocidad. Cuanto más rápido va el rociador, menos recibe un acre: divida entre mi/h por pulgadas.',
     }),
   },
   {
@@ -156,15 +156,15 @@ const rateSlips = slipsAt<Given>(['a', 'b', 'c'], ratePart, [
     answer: (g, earlier) => scale(rate(g, earlier), g.spacing.value),
     message: (g) => ({
       en: en`You left out the spacing. Each nozzle covers a strip of ${g.spacing}: divide by mph times inches.`,
-      es: es`Le faltó la separación. Cada boquilla cubre una franja de ${g.spacing}: divida entre mph por pulgadas.`,
+      es: es`Le faltó la separación. Cada boquilla cubre una franja de ${g.spacing}: divida entre mi/h por pulgadas.`,
     }),
   },
   {
     key: 'inverted',
     answer: (g, earlier) => quantity(rate(g, earlier).value.inverse(), 'gal/acre'),
     message: () => ({
-      en: 'You turned the sum over. 5,940 × GPM stands on top, mph × inches below.',
-      es: 'Usted invirtió la cuenta. Arriba va 5,940 × GPM, abajo mph × pulgadas.',
+      en: 'You turned the sum over. 5,940 × gallons per minute stands on top, mph × inches below.',
+      es: 'Usted invirtió la cuenta. Arriba van 5,940 × galones por minuto, abajo mi/h × pulgadas.',
     }),
   },
 ]);

@@ -73,7 +73,7 @@ function speedPart(g: Given): NumberPart {
     topic: 'boom',
     ask: both(
       'What is the speed in miles per hour (mph), to the nearest 0.1 mph?',
-      '¿Cuál es la velocidad en millas por hora (mph), redondeada a 0.1 mph?',
+      '¿Cuál es la velocidad en millas por hora (mi/h), redondeada a 0.1 mi/h?',
     ),
     answer: travelSpeed(g),
     step: tenth,
@@ -165,7 +165,7 @@ function working(g: Given): readonly WorkingLine[] {
       answers: true,
       reason: both(
         '5,940 is 43,560 sq ft × 12 in ÷ 88 ft per minute: it brings gallons a minute, mph and inches to gallons an acre.',
-        '5,940 es 43,560 pies² × 12 pulg ÷ 88 pies por minuto: lleva galones por minuto, mph y pulgadas a galones por acre.',
+        '5,940 es 43,560 pies² × 12 pulg ÷ 88 pies por minuto: lleva galones por minuto, mi/h y pulgadas a galones por acre.',
       ),
     },
   ];
@@ -175,7 +175,7 @@ function hints(g: Given): readonly [Text, Text, Text] {
   const { test } = g;
   const relation = both(
     'Gallons per acre = 5,940 × gallons per minute of one nozzle ÷ (mph × inches between nozzles).',
-    'Galones por acre = 5,940 × galones por minuto de una boquilla ÷ (mph × pulgadas entre boquillas).',
+    'Galones por acre = 5,940 × galones por minuto de una boquilla ÷ (mi/h × pulgadas entre boquillas).',
   );
   if (test.as === 'flow') {
     return [
@@ -207,7 +207,7 @@ function hints(g: Given): readonly [Text, Text, Text] {
         first,
         {
           en: `${relation.en} mph = feet × 60 ÷ (seconds × 88).`,
-          es: `${relation.es} mph = pies × 60 ÷ (segundos × 88).`,
+          es: `${relation.es} mi/h = pies × 60 ÷ (segundos × 88).`,
         },
         both(en`Begin with ${test.flow} ÷ ${g.nozzles}.`, es`Empiece con ${test.flow} ÷ ${g.nozzles}.`),
       ];

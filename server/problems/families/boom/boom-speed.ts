@@ -43,7 +43,7 @@ function parts(g: Given, earlier: Earlier): readonly NumberPart[] {
     topic: 'boom',
     ask: both(
       'What is the speed in miles per hour (mph), to the nearest 0.1 mph?',
-      '¿Cuál es la velocidad en millas por hora (mph), redondeada a 0.1 mph?',
+      '¿Cuál es la velocidad en millas por hora (mi/h), redondeada a 0.1 mi/h?',
     ),
     answer,
     step: tenth,
@@ -146,7 +146,7 @@ function hints(g: Given): readonly [Text, Text, Text] {
         ),
     both(
       'Miles per hour = feet × 60 ÷ (seconds × 88), since 1 mph is 88 feet per minute.',
-      'Millas por hora = pies × 60 ÷ (segundos × 88), porque 1 mph son 88 pies por minuto.',
+      'Millas por hora = pies × 60 ÷ (segundos × 88), porque 1 mi/h son 88 pies por minuto.',
     ),
     second
       ? both(en`Begin with (${first} + ${second}) ÷ 2.`, es`Empiece con (${first} + ${second}) ÷ 2.`)

@@ -106,7 +106,7 @@ const productSlips: readonly Slip<Given>[] = [
     answer: (g) => convert(g.line.product, askedUnit(g)),
     message: (g) => ({
       en: en`That is the product for one gallon. The label's ${g.line.product} goes into each gallon you mix.`,
-      es: es`Ese es el producto para un galón. Los ${g.line.product} de la etiqueta van en cada galón que prepare.`,
+      es: es`Ese es el producto para un galón. La cantidad de la etiqueta, ${g.line.product}, va en cada galón que prepare.`,
     }),
   },
   {
