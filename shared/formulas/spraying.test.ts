@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { compare, convert, quantity, ratio, type Quantity } from '../quantity/quantity.ts';
+import { convert, quantity, ratio, type Quantity } from '../quantity/quantity.ts';
 import { rational } from '../quantity/rational.ts';
 import type { UnitKey } from '../quantity/units.ts';
 import { flowAtPressure } from './flow-at-pressure.ts';
