@@ -2,7 +2,8 @@ import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { render, screen, waitFor } from '@testing-library/react';
 import { userEvent } from '@testing-library/user-event';
 import { MemoryRouter, Route, Routes, useLocation } from 'react-router';
-import { expect, test, vi } from 'vitest';
+import { expect, test } from 'vitest';
+import { answerFetch } from '../../../tests/support/answer-fetch.ts';
 import { sessionQuery } from '../../lib/session.ts';
 import SignIn, { safeNext } from './sign-in.tsx';
 
@@ -30,9 +31,9 @@ const me = {
 /** The page at an address, with the server's answer to the form. */
 function open(address: string, answer: () => Response) {
   const sent: unknown[] = [];
-  vi.spyOn(globalThis, 'fetch').mockImplementation(async (input, init) => {
-    if (String(input) === '/api/session') return reply(200, { me: sent.length > 0 ? me : null, mailbox: true });
-    sent.push(JSON.parse(String(init?.body)));
+  answerFetch((path, body) => {
+    if (path === '/api/session') return reply(200, { me: sent.length > 0 ? me : null, mailbox: true });
+    sent.push(body);
     return answer();
   });
   const client = new QueryClient();

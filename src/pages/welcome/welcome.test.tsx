@@ -3,6 +3,7 @@ import { render, screen, waitFor } from '@testing-library/react';
 import { userEvent } from '@testing-library/user-event';
 import { MemoryRouter } from 'react-router';
 import { beforeEach, expect, test, vi } from 'vitest';
+import { answerFetch } from '../../../tests/support/answer-fetch.ts';
 import type { AttemptView, ProblemView, SampleReply } from '../../../shared/contracts/practice.ts';
 import { sessionQuery } from '../../lib/session.ts';
 import Welcome from './welcome.tsx';
@@ -56,9 +57,9 @@ beforeEach(() => {
   answers = [];
   sent = [];
   Element.prototype.scrollIntoView = vi.fn<() => void>();
-  vi.spyOn(globalThis, 'fetch').mockImplementation(async (input, init) => {
-    if (String(input).startsWith('/api/sample?')) return Response.json(problem);
-    sent.push([String(input), JSON.parse(String(init?.body))]);
+  answerFetch((path, body) => {
+    if (path.startsWith('/api/sample?')) return Response.json(problem);
+    sent.push([path, body]);
     const answer = answers.shift();
     if (answer === undefined || answer === 'down') throw new TypeError('Failed to fetch');
     return Response.json(answer);
