@@ -148,10 +148,10 @@ export function roundingMessage(part: NumberPart): Message {
 
 /** None of the known slips. */
 export const unrecognisedMessage: Message = {
-  headline: { en: 'Not right yet.', es: 'Todavía no es correcto.' },
+  headline: { en: 'This is none of the usual slips.', es: 'No es ninguno de los errores comunes.' },
   detail: {
-    en: 'This is none of the usual slips. Check each number you took from the problem, or take a hint.',
-    es: 'No es ninguno de los errores comunes. Revise cada número que tomó del problema, o pida una pista.',
+    en: 'Check each number you took from the problem, or take a hint.',
+    es: 'Revise cada número que tomó del problema, o pida una pista.',
   },
 };
 

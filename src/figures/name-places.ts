@@ -54,7 +54,9 @@ function plate([x, y]: Point, text: string): Box {
 }
 
 function inside(inner: Box, outer: Box): boolean {
-  return inner.left >= outer.left && inner.right <= outer.right && inner.top >= outer.top && inner.bottom <= outer.bottom;
+  return (
+    inner.left >= outer.left && inner.right <= outer.right && inner.top >= outer.top && inner.bottom <= outer.bottom
+  );
 }
 
 /**

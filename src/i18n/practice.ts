@@ -15,7 +15,6 @@ export const practiceMessages = i18n('practice', {
   keys: 'Signs that phone keypads lack',
   check: params('Check ({part})'),
   checkOne: 'Check',
-  checkOne: 'Check',
   checking: 'Checking …',
   notSaved: 'Not saved yet. Trying again …',
   couldNotSave: 'The server cannot be reached. Your answer is kept here: press Check again when you are connected.',

@@ -12,7 +12,6 @@ export const es = {
   keys: 'Signos que faltan en el teclado del teléfono',
   check: 'Revisar ({part})',
   checkOne: 'Revisar',
-  checkOne: 'Revisar',
   checking: 'Revisando …',
   notSaved: 'Todavía no se guardó. Intentando otra vez …',
   couldNotSave: 'No hay conexión con el servidor. Su respuesta queda aquí: pulse Revisar cuando tenga conexión.',
