@@ -33,6 +33,7 @@ export const accountMessages = i18n('account', {
   changePassword: 'Change the password',
   passwordChanged: 'Your password is changed.',
   show: 'Show the passwords',
+  showOne: 'Show the password',
   sessions: 'Where you are signed in',
   sessionsHelp: 'End what you do not know, then change your password.',
   thisOne: 'this device',

@@ -6,7 +6,6 @@ export const staffMessages = i18n('staff', {
   intro: 'Every family with samples of each tier, its slips and what each says. For authors: answers are shown.',
   table: 'Problem families by topic',
   family: 'Family',
-  topic: 'Topic',
   tiers: 'Tiers',
   slips: 'Slips',
   version: 'Version',

@@ -41,7 +41,7 @@ export function DataTable<Row>(props: {
           {rows.map((row) => (
             <tr key={rowKey(row)}>
               {columns.map(({ key, number, cell }, index) => {
-                const look = `border-b border-rule px-2 py-2 align-top ${number ? 'text-right tabular-nums' : 'text-left'}`;
+                const look = `border-b border-rule px-2 py-2 align-top ${number ? 'text-right whitespace-nowrap tabular-nums' : 'text-left'}`;
                 return index === 0 ? (
                   <th key={key} scope="row" className={`${look} font-semibold`}>
                     {cell(row)}

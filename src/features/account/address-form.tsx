@@ -27,7 +27,7 @@ export function AddressForm({ email }: { email: string }) {
         autoComplete="email"
       />
       <Failure error={change.error} className="" />
-      <output className="block">{change.isSuccess && <Notice tone="good">{t.addressSent}</Notice>}</output>
+      <output className="block empty:-mt-4">{change.isSuccess && <Notice tone="good">{t.addressSent}</Notice>}</output>
       <Button type="submit" look="quiet" disabled={change.isPending} className="justify-self-start">
         {t.changeAddress}
       </Button>

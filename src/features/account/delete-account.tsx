@@ -36,7 +36,7 @@ export function DeleteAccount({ me, onDone }: { me: MeView; onDone: () => void }
             onChange={(event) => setPassword(event.target.value)}
             error={missing ? t.passwordMissing : undefined}
             autoComplete="current-password"
-            show={t.show}
+            show={t.showOne}
           />
           <Failure error={remove.error} className="" />
           <div className="flex flex-wrap gap-4">

@@ -7,13 +7,13 @@ import { topicMessages } from '../../i18n/words.ts';
 import { DataTable } from '../../ui/data-table.tsx';
 import { Field } from '../../ui/field.tsx';
 
-function nameCell({ key, title, to }: { key: string; title: string; to: string }) {
+function nameCell({ about, title, to }: { about: string; title: string; to: string }) {
   return (
     <>
       <Link to={to} className="inline-flex min-h-6 items-center">
         {title}
       </Link>
-      <span className="block text-sm font-normal text-ink-soft">{key}</span>
+      <span className="block text-sm font-normal text-ink-soft">{about}</span>
     </>
   );
 }
@@ -47,9 +47,8 @@ export function FamilyTable({
           {
             key: 'family',
             head: t.family,
-            cell: ({ key, title }) => nameCell({ key, title, to: linkTo(key) }),
+            cell: ({ key, title, topic }) => nameCell({ about: `${topics[topic]} · ${key}`, title, to: linkTo(key) }),
           },
-          { key: 'topic', head: t.topic, cell: ({ topic }) => topics[topic] },
           { key: 'tiers', head: t.tiers, number: true, cell: ({ tiers }) => tiers.join(', ') },
           { key: 'slips', head: t.slips, number: true, cell: ({ slips }) => slips },
           { key: 'version', head: t.version, number: true, cell: ({ version }) => version },

@@ -49,15 +49,19 @@ function Slips({ sample }: { sample: ProofSample }) {
   );
 }
 
+function unbroken(text: string) {
+  return <span className="whitespace-nowrap">{text}</span>;
+}
+
 /** One drawn problem with everything its author must check: what is asked, what is right, what each slip gives and says. */
 export function ProofSampleSheet({ sample }: { sample: ProofSample }) {
   const t = useStore(staffMessages);
   const { tier, seed, figure, label, parts } = sample;
   const offered = parts.filter((part) => part.options.length > 0);
   return (
-    <Sheet graduated className="mb-6" aria-labelledby={`sample-${tier}-${seed}`}>
+    <Sheet graduated className="mb-6" aria-label={t.sample({ tier, seed })}>
       <p className="text-sm text-ink-soft">{t.sample({ tier, seed })}</p>
-      <h2 id={`sample-${tier}-${seed}`}>{sample.heading}</h2>
+      <h2>{sample.heading}</h2>
       <p className="my-3 max-w-[38rem] font-serif text-[1.1rem]">{sample.statement}</p>
       <div className={label ? 'grid gap-x-6 wide:grid-cols-[minmax(0,1fr)_20rem]' : ''}>
         <div className="min-w-0">
@@ -69,7 +73,7 @@ export function ProofSampleSheet({ sample }: { sample: ProofSample }) {
             rowKey={({ key }) => key}
             columns={[
               { key: 'ask', head: t.ask, cell: ({ key, ask }) => `(${key}) ${ask}` },
-              { key: 'answer', head: t.answer, cell: ({ answer }) => answer },
+              { key: 'answer', head: t.answer, cell: ({ answer }) => unbroken(answer) },
             ]}
           />
         </div>

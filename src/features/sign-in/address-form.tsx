@@ -33,7 +33,7 @@ export function AddressForm({ sends, email = '', button, sent }: AddressFormProp
         autoComplete="email"
       />
       <Failure error={send.error} className="" />
-      <output className="block">{send.isSuccess && <Notice tone="good">{sent}</Notice>}</output>
+      <output className="block empty:-mt-4">{send.isSuccess && <Notice tone="good">{sent}</Notice>}</output>
       <Button type="submit" disabled={send.isPending} className="justify-self-start">
         {button}
       </Button>

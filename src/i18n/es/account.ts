@@ -30,6 +30,7 @@ export const es = {
   changePassword: 'Cambiar la contraseña',
   passwordChanged: 'Su contraseña está cambiada.',
   show: 'Mostrar las contraseñas',
+  showOne: 'Mostrar la contraseña',
   sessions: 'Dónde tiene la sesión abierta',
   sessionsHelp: 'Cierre lo que no conozca y luego cambie su contraseña.',
   thisOne: 'este aparato',

@@ -4,7 +4,6 @@ export const es = {
     'Cada familia con muestras de cada nivel, sus errores y lo que se dice de cada uno. Para autores: se ven las respuestas.',
   table: 'Familias de problemas por tema',
   family: 'Familia',
-  topic: 'Tema',
   tiers: 'Niveles',
   slips: 'Errores',
   version: 'Versión',
