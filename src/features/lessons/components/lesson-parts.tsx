@@ -3,6 +3,7 @@ import type { ComponentProps } from 'react';
 import { Link } from 'react-router';
 import { lessonMessages } from '../../../i18n/lessons.ts';
 import { ScrollBox } from '../../../ui/scroll-box.tsx';
+import { AtTheTank, Caution, Compare, Figure, Steps, TryIt, WorkedExample } from './blocks.tsx';
 import { Checkpoint } from './checkpoint.tsx';
 
 /** Links inside the product stay in it; others open as links do. */
@@ -26,4 +27,15 @@ function Table(props: ComponentProps<'table'>) {
 }
 
 /** Everything a lesson's text may use besides plain Markdown. */
-export const lessonParts = { a: Anchor, table: Table, Checkpoint };
+export const lessonParts = {
+  a: Anchor,
+  table: Table,
+  AtTheTank,
+  Caution,
+  Checkpoint,
+  Compare,
+  Figure,
+  Steps,
+  TryIt,
+  WorkedExample,
+};
