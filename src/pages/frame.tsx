@@ -88,7 +88,7 @@ function Top({ mailbox }: { mailbox: boolean }) {
         <span className="font-serif text-[1.375rem] leading-none font-bold tracking-tight">Tankmark</span>
       </Link>
       {mailbox && (
-        <Link to={paths.mailbox} className="inline-flex min-h-11 items-center">
+        <Link to={paths.mailbox} className="hidden min-h-11 items-center wide:inline-flex">
           {t.mailbox}
         </Link>
       )}

@@ -26,7 +26,7 @@ export function VerdictPanel({ attempt, ref }: { attempt: AttemptView; ref?: Ref
       ref={ref}
       tabIndex={-1}
       data-quiet-focus=""
-      className={`mt-2.5 max-w-[44rem] border-l-4 px-3 py-2.5 ${look.box}`}
+      className={`mt-2.5 max-w-[44rem] scroll-mb-24 border-l-4 px-3 py-2.5 ${look.box}`}
     >
       <p className={`flex items-center gap-1.5 text-sm font-bold ${look.sign}`}>
         <svg

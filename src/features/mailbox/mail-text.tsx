@@ -5,7 +5,7 @@ const address = /(https?:\/\/\S+)/;
 /** A message's plain text; addresses of our own site become links, others stay text. */
 export function MailText({ text }: { text: string }) {
   return (
-    <div className="break-words whitespace-pre-wrap">
+    <div className="[overflow-wrap:anywhere] whitespace-pre-wrap">
       {text.split(address).map((piece, index) => {
         // A message does not change: the place of a piece is who it is.
         const key = `${String(index)} ${piece}`;

@@ -19,7 +19,7 @@ export function SamplePart({ sample, part, lettered }: { sample: SampleId; part:
   const verdict = useRef<HTMLDivElement>(null);
   const attempt = answer.data?.attempt ?? null;
   useEffect(() => {
-    if (attempt) verdict.current?.focus({ preventScroll: true });
+    if (attempt) verdict.current?.focus();
   }, [attempt]);
   const check = (event: FormEvent) => {
     event.preventDefault();

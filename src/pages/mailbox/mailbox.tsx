@@ -53,7 +53,7 @@ export default function Mailbox() {
       {mails.length === 0 ? (
         <p className="max-w-prose">{t.empty}</p>
       ) : (
-        <div className="grid items-start gap-6 wide:grid-cols-[22rem_minmax(0,1fr)]">
+        <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-6 wide:grid-cols-[22rem_minmax(0,1fr)]">
           <div className={`border border-rule bg-sheet ${shownId === null ? '' : 'hidden wide:block'}`}>
             <MailList mails={mails} shownId={shownId} linkTo={(id) => `${paths.mailbox}?message=${id}`} />
           </div>

@@ -29,10 +29,14 @@ function Columns({ parts }: { parts: readonly (readonly [title: string, text: st
 export default function Welcome() {
   const t = useStore(welcomeMessages);
   const me = useMe();
-  const sample = useRef<HTMLDivElement>(null);
+  const sample = useRef<HTMLElement>(null);
   const workNow = () => {
-    sample.current?.scrollIntoView({ block: 'start', behavior: 'smooth' });
-    sample.current?.querySelector('input')?.focus({ preventScroll: true });
+    const sheet = sample.current;
+    if (!sheet) return;
+    sheet.scrollIntoView({ block: 'start' });
+    // A phone's keypad would cover the problem before it is read: there the heading takes the focus.
+    const fits = sheet.getBoundingClientRect().height <= window.innerHeight;
+    sheet.querySelector<HTMLElement>(fits ? 'input' : 'h2')?.focus({ preventScroll: true });
   };
   useDocumentTitle(t.documentTitle);
   return (
@@ -54,12 +58,12 @@ export default function Welcome() {
             )}
           </div>
         </div>
-        <Sheet graduated aria-labelledby="sample">
-          <h2 id="sample">{t.sampleTitle}</h2>
+        <Sheet ref={sample} graduated aria-labelledby="sample" className="scroll-mt-4">
+          <h2 id="sample" tabIndex={-1} data-quiet-focus="">
+            {t.sampleTitle}
+          </h2>
           <p className="mb-3 text-sm text-ink-soft">{t.sampleHelp}</p>
-          <div ref={sample}>
-            <SampleWork />
-          </div>
+          <SampleWork />
         </Sheet>
       </div>
       <section className="border-t-2 border-ink pt-2" aria-labelledby="what">
