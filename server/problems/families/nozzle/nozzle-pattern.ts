@@ -3,7 +3,7 @@ import type { Text, Tier } from '../../../../shared/vocabulary.ts';
 import { defineFamily, type ChoicePart, type Slip } from '../../family.ts';
 import type { Rng } from '../../rng.ts';
 import { en, es } from '../../say.ts';
-import { drawScene, type Scene } from '../../situations.ts';
+import { capital, drawScene, type Scene } from '../../situations.ts';
 import type { WorkingLine } from '../../working.ts';
 import { both } from '../both.ts';
 import { patternJobs } from './pattern-jobs.ts';
@@ -41,19 +41,36 @@ function draw(rng: Rng, tier: Tier): Given {
   };
 }
 
+function openingsFor(g: Given): readonly Text[] {
+  if (g.asks === 'fit') {
+    return [
+      both(
+        en`${g.person} gets the sprayer ready for work at ${g.place.the}.`,
+        es`${g.person} prepara el rociador para el trabajo ${g.place.at}.`,
+      ),
+      both(
+        en`${g.person} and the crew leader look at a job ${g.place.at}.`,
+        es`${g.person} y el jefe de cuadrilla miran un trabajo ${g.place.at}.`,
+      ),
+      both(en`The crew works ${g.place.at} ${g.season}.`, es`La cuadrilla trabaja ${g.place.at} ${g.season}.`),
+    ];
+  }
+  return [
+    both(en`${g.person} checks a job ${g.place.at}.`, es`${g.person} revisa un trabajo ${g.place.at}.`),
+    both(
+      en`${g.person} and the crew leader look at a sprayer ${g.place.at}.`,
+      es`${g.person} y el jefe de cuadrilla miran un rociador ${g.place.at}.`,
+    ),
+    both(
+      en`${capital(g.season)} a sprayer gives trouble ${g.place.at}.`,
+      es`${capital(g.season)} un rociador da problemas ${g.place.at}.`,
+    ),
+  ];
+}
+
 function statement(g: Given): Text {
   const told = ruleOf(g).told[g.told] ?? both('', '');
-  const opening = [
-    both(
-      en`${g.person} gets the sprayer ready for work at ${g.place.the}.`,
-      es`${g.person} prepara el rociador para el trabajo ${g.place.at}.`,
-    ),
-    both(
-      en`${g.person} and the crew leader look at a job ${g.place.at}.`,
-      es`${g.person} y el jefe de cuadrilla miran un trabajo ${g.place.at}.`,
-    ),
-    both(en`The crew works ${g.place.at} ${g.season}.`, es`La cuadrilla trabaja ${g.place.at} ${g.season}.`),
-  ][g.situation];
+  const opening = openingsFor(g)[g.situation];
   return both(en`${opening ?? ''} ${told}`, es`${opening ?? ''} ${told}`);
 }
 

@@ -22,14 +22,14 @@ export function plantsOf(g: WaterTestGiven): Text {
   if (g.line.site === 'trees') return both('young trees', 'árboles jóvenes');
   return g.line.site === 'bed' ? both('rose bushes', 'rosales') : both('shrubs', 'arbustos');
 }
-/** "24 shrubs", or "rows of 18 and 24 shrubs". */
+/** "24 shrubs", or "a row of 18 and a row of 24 shrubs". */
 function planted(g: WaterTestGiven): Text {
   const [first, second] = g.rows;
   return second === undefined
     ? both(en`${first ?? 0} ${plantsOf(g)}`, es`${first ?? 0} ${plantsOf(g)}`)
     : both(
-        en`two rows, of ${first ?? 0} and ${second} ${plantsOf(g)}`,
-        es`dos hileras, de ${first ?? 0} y ${second} ${plantsOf(g)}`,
+        en`a row of ${first ?? 0} and a row of ${second} ${plantsOf(g)}`,
+        es`una hilera de ${first ?? 0} y otra de ${second} ${plantsOf(g)}`,
       );
 }
 function rate(g: WaterTestGiven): Text {
@@ -58,8 +58,8 @@ export const waterTestSituations: readonly Situation<WaterTestGiven>[] = [
     heading: both('How much for all of them', 'Cuánto para todos'),
     statement: (g) =>
       both(
-        en`${capital(g.season)}, before mixing anything, ${g.person} sprays plain water on ${g.tried} ${plantsOf(g)} ${g.place.at} and uses ${firstUse(g.used)}. There are ${planted(g)} in all. ${rate(g)}`,
-        es`${capital(g.season)}, antes de preparar la mezcla, ${g.person} rocía agua sola en ${g.tried} ${plantsOf(g)} ${g.place.at} y usa ${firstUse(g.used)}. En total hay ${planted(g)}. ${rate(g)}`,
+        en`${capital(g.season)}, before mixing anything, ${g.person} sprays plain water on ${g.tried} ${plantsOf(g)} ${g.place.at} and uses ${firstUse(g.used)}. The whole job is ${planted(g)}. ${rate(g)}`,
+        es`${capital(g.season)}, antes de preparar la mezcla, ${g.person} rocía agua sola en ${g.tried} ${plantsOf(g)} ${g.place.at} y usa ${firstUse(g.used)}. Todo el trabajo es ${planted(g)}. ${rate(g)}`,
       ),
   },
   {
@@ -75,7 +75,7 @@ export const waterTestSituations: readonly Situation<WaterTestGiven>[] = [
     statement: (g) =>
       both(
         en`No record says how much spray the plants ${g.place.at} take. ${g.person} tries it: ${g.tried} ${plantsOf(g)} take ${firstUse(g.used)} of water. The job is ${planted(g)}. ${rate(g)}`,
-        es`Ningún registro dice cuánta mezcla llevan las plantas ${g.place.at}. ${g.person} hace la prueba: ${g.tried} ${plantsOf(g)} llevan ${firstUse(g.used)} de agua. El trabajo es de ${planted(g)}. ${rate(g)}`,
+        es`Ningún registro dice cuánta mezcla llevan las plantas ${g.place.at}. ${g.person} hace la prueba: ${g.tried} ${plantsOf(g)} llevan ${firstUse(g.used)} de agua. El trabajo es ${planted(g)}. ${rate(g)}`,
       ),
   },
 ];

@@ -32,22 +32,27 @@ function draw(rng: Rng, tier: Tier): Given | null {
   const line = rng.pick(granuleLines);
   const drawnScene = drawScene(rng, spreaderNeedSituations.length);
   const scene = line.site === 'turf' ? { ...drawnScene, place: rng.pick(placesWithField) } : drawnScene;
-  const bag = quantity(rng.pick([20, 25, 40, 50]), 'lb');
+  // On the third tier several bags are needed, so a small site comes with small ones.
+  const small = tier === 3 && line.site !== 'turf';
+  const bag = quantity(rng.pick(small ? [10, 15, 20] : [20, 25, 40, 50]), 'lb');
   if (tier === 1) {
     const [least, most] = areas[line.site];
     const area = quantity(rng.int(least, most) * 100, 'sq-ft');
+    if (area.value.compare(1000) === 0) return null;
     return { ...scene, line, bag, known: { as: 'area', area }, bagsAsked: false };
   }
   const { width, longer } = ranges[line.site];
   const wide = rng.int(width[0], width[1]);
   const known = { as: 'sides', length: ft(wide + rng.int(longer[0], longer[1])), width: ft(wide) } as const;
   const g: Given = { ...scene, line, bag, known, bagsAsked: tier === 3 };
+  // On 1,000 sq ft there is nothing to scale.
+  if (siteArea(g).value.compare(1000) === 0) return null;
   if (tier === 2) return g;
   // Whole bags must not hang on how the pounds were rounded, and a job of one bag asks nothing.
   const needed = ratio(pounds(g, {}), bag);
   const over = needed.sub(needed.floor());
   const clear = over.compare('0.06') > 0 && over.compare('0.94') < 0;
-  return clear && needed.compare(1) > 0 && needed.compare(16) < 0 ? g : null;
+  return clear && needed.compare('1.4') > 0 && needed.compare(16) < 0 ? g : null;
 }
 
 function parts(g: Given, earlier: Earlier): readonly Part[] {

@@ -34,13 +34,13 @@ function facts(g: TankLoadsGiven): Text {
   }
   if (job.as === 'area') {
     return both(
-      en`It covers ${firstUse(job.area)}, and the sprayer puts out ${firstUse(job.rate)}. ${full.en}`,
-      es`Cubre ${firstUse(job.area)} y el rociador aplica ${firstUse(job.rate)}. ${full.es}`,
+      en`The turf covers ${firstUse(job.area)}, and the sprayer puts out ${firstUse(job.rate)}. ${full.en}`,
+      es`El césped cubre ${firstUse(job.area)} y el rociador aplica ${firstUse(job.rate)}. ${full.es}`,
     );
   }
   return both(
-    en`It is ${firstUse(job.length)} by ${job.width}, and the sprayer puts out ${firstUse(job.rate)}. ${full.en}`,
-    es`Mide ${firstUse(job.length)} por ${job.width} y el rociador aplica ${firstUse(job.rate)}. ${full.es}`,
+    en`The field is ${firstUse(job.length)} by ${job.width}, and the sprayer puts out ${firstUse(job.rate)}. ${full.en}`,
+    es`El campo mide ${firstUse(job.length)} por ${job.width} y el rociador aplica ${firstUse(job.rate)}. ${full.es}`,
   );
 }
 function site(g: TankLoadsGiven): Text {

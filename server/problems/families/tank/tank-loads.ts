@@ -47,6 +47,7 @@ function draw(rng: Rng, tier: Tier): Given | null {
   const drawnScene = drawScene(rng, tankLoadsSituations.length);
   const scene = tier === 3 ? { ...drawnScene, place: rng.pick(placesWithField) } : drawnScene;
   const g: Given = { ...scene, ...drawJob(rng, tier) };
+  if (g.job.as === 'sides' && siteAcres(g).value.compare(1) === 0) return null;
   const exact = exactLoads(g);
   const part = exact.sub(exact.floor());
   if (exact.compare(1) <= 0 || exact.compare(7) >= 0) return null;
