@@ -8,6 +8,11 @@ export const lessonFrontSchema = z.object({
   minutes: z.number().int().min(1).max(60),
   objectives: z.array(z.string().min(1)).min(1),
   families: z.array(z.string().min(1)).default([]),
+  sources: z
+    .array(z.object({ title: z.string().min(1), publisher: z.string().min(1), year: z.number().int().nullable() }))
+    .min(1),
+  /** Day of the last revision. */
+  revised: z.iso.date(),
 });
 
 export const lessonStates = ['not-started', 'reading', 'read'] as const;

@@ -16,6 +16,8 @@ function lessonText(title: string, options: { topic: string; checkpoints: string
     'minutes: 6',
     'objectives: [Measure a bed]',
     'families: [area-circle]',
+    'sources: [{ title: A bulletin, publisher: An extension service, year: null }]',
+    'revised: 2026-12-01',
   ];
   return ['---', ...front, '---', '', `# ${title}`, ...tags].join('\n');
 }
