@@ -7,6 +7,7 @@ import { nameSchema } from '../../../shared/contracts/auth.ts';
 import { locales } from '../../../shared/vocabulary.ts';
 import { accountMessages } from '../../i18n/account.ts';
 import { languageNames } from '../../i18n/i18n.ts';
+import { markFaults } from '../../lib/field-faults.ts';
 import { Button } from '../../ui/button.tsx';
 import { Failure } from '../../ui/failure.tsx';
 import { Field, SelectField } from '../../ui/field.tsx';
@@ -19,7 +20,9 @@ export function AboutYou({ me }: { me: MeView }) {
   const t = useStore(accountMessages);
   const change = useChangeMe();
   const form = useForm({ resolver: zodResolver(bodySchema), defaultValues: { name: me.name, language: me.language } });
-  const submit = form.handleSubmit((body) => change.mutate(body));
+  const submit = form.handleSubmit((body) =>
+    change.mutate(body, { onError: (error) => markFaults(error, form.setError) }),
+  );
   return (
     <form onSubmit={(event) => void submit(event)} noValidate className="grid gap-4">
       <Field

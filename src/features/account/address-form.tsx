@@ -3,6 +3,7 @@ import { useStore } from '@nanostores/react';
 import { useForm } from 'react-hook-form';
 import { changeEmailBodySchema } from '../../../shared/contracts/auth.ts';
 import { accountMessages } from '../../i18n/account.ts';
+import { markFaults } from '../../lib/field-faults.ts';
 import { Button } from '../../ui/button.tsx';
 import { Failure } from '../../ui/failure.tsx';
 import { Field } from '../../ui/field.tsx';
@@ -14,10 +15,12 @@ export function AddressForm({ email }: { email: string }) {
   const t = useStore(accountMessages);
   const change = useChangeAddress();
   const form = useForm({ resolver: zodResolver(changeEmailBodySchema), defaultValues: { newEmail: '' } });
-  const submit = form.handleSubmit((body) => change.mutate(body.newEmail));
+  const submit = form.handleSubmit((body) =>
+    change.mutate(body.newEmail, { onError: (error) => markFaults(error, form.setError) }),
+  );
   return (
     <form onSubmit={(event) => void submit(event)} noValidate className="grid gap-4">
-      <p className="break-words">{t.addressNow({ email })}</p>
+      <p className="[overflow-wrap:anywhere]">{t.addressNow({ email })}</p>
       <Field
         {...form.register('newEmail')}
         type="email"

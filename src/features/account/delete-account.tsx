@@ -29,7 +29,7 @@ export function DeleteAccount({ me, onDone }: { me: MeView; onDone: () => void }
       )}
       {asking && (
         <form onSubmit={submit} noValidate className="grid gap-4 border-l-4 border-clay bg-clay-wash p-4">
-          <p className="font-semibold break-words">{t.removeAsk({ name: me.name, email: me.email })}</p>
+          <p className="font-semibold [overflow-wrap:anywhere]">{t.removeAsk({ name: me.name, email: me.email })}</p>
           <PasswordField
             label={t.currentPassword}
             value={password}

@@ -4,6 +4,7 @@ import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { changePasswordBodySchema, passwordLength } from '../../../shared/contracts/auth.ts';
 import { accountMessages } from '../../i18n/account.ts';
+import { markFaults } from '../../lib/field-faults.ts';
 import { Button } from '../../ui/button.tsx';
 import { Failure } from '../../ui/failure.tsx';
 import { Field } from '../../ui/field.tsx';
@@ -21,7 +22,9 @@ export function PasswordForm() {
   const [shown, setShown] = useState(false);
   const typed = { type: shown ? 'text' : 'password', autoCapitalize: 'none', spellCheck: false };
   const { errors } = form.formState;
-  const submit = form.handleSubmit((body) => change.mutate(body, { onSuccess: () => form.reset() }));
+  const submit = form.handleSubmit((body) =>
+    change.mutate(body, { onSuccess: () => form.reset(), onError: (error) => markFaults(error, form.setError) }),
+  );
   return (
     <form onSubmit={(event) => void submit(event)} noValidate className="grid gap-4">
       <Field

@@ -3,6 +3,7 @@ import { useStore } from '@nanostores/react';
 import { useForm } from 'react-hook-form';
 import { emailBodySchema } from '../../../shared/contracts/auth.ts';
 import { signInMessages } from '../../i18n/sign-in.ts';
+import { markFaults } from '../../lib/field-faults.ts';
 import { Button } from '../../ui/button.tsx';
 import { Failure } from '../../ui/failure.tsx';
 import { Field } from '../../ui/field.tsx';
@@ -22,7 +23,9 @@ export function AddressForm({ sends, email = '', button, sent }: AddressFormProp
   const t = useStore(signInMessages);
   const send = useSendMail(sends);
   const form = useForm({ resolver: zodResolver(emailBodySchema), defaultValues: { email } });
-  const submit = form.handleSubmit((body) => send.mutate(body.email));
+  const submit = form.handleSubmit((body) =>
+    send.mutate(body.email, { onError: (error) => markFaults(error, form.setError) }),
+  );
   return (
     <form onSubmit={(event) => void submit(event)} noValidate className="grid gap-4">
       <Field

@@ -3,6 +3,7 @@ import { useStore } from '@nanostores/react';
 import { useForm } from 'react-hook-form';
 import { passwordLength, resetPasswordBodySchema } from '../../../shared/contracts/auth.ts';
 import { signInMessages } from '../../i18n/sign-in.ts';
+import { markFaults } from '../../lib/field-faults.ts';
 import { Button } from '../../ui/button.tsx';
 import { Failure } from '../../ui/failure.tsx';
 import { PasswordField } from '../../ui/password-field.tsx';
@@ -13,7 +14,9 @@ export function ResetForm({ token, onDone }: { token: string; onDone: () => void
   const t = useStore(signInMessages);
   const reset = useReset();
   const form = useForm({ resolver: zodResolver(resetPasswordBodySchema), defaultValues: { token } });
-  const submit = form.handleSubmit((body) => reset.mutate(body, { onSuccess: onDone }));
+  const submit = form.handleSubmit((body) =>
+    reset.mutate(body, { onSuccess: onDone, onError: (error) => markFaults(error, form.setError) }),
+  );
   return (
     <form onSubmit={(event) => void submit(event)} noValidate className="grid gap-4">
       <PasswordField

@@ -4,6 +4,7 @@ import { useForm } from 'react-hook-form';
 import { signInBodySchema, type SignInBody } from '../../../shared/contracts/auth.ts';
 import { signInMessages } from '../../i18n/sign-in.ts';
 import { ApiError } from '../../lib/api.ts';
+import { markFaults } from '../../lib/field-faults.ts';
 import { Button } from '../../ui/button.tsx';
 import { Failure } from '../../ui/failure.tsx';
 import { Field } from '../../ui/field.tsx';
@@ -25,6 +26,7 @@ export function SignInForm({ onDone, onUnconfirmed }: SignInFormProps) {
     signIn.mutate(body, {
       onSuccess: onDone,
       onError: (error) => {
+        markFaults(error, form.setError);
         if (error instanceof ApiError && error.code === 'address-unconfirmed') onUnconfirmed(body.email);
       },
     }),

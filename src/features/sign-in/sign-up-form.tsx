@@ -5,6 +5,7 @@ import { passwordLength, signUpBodySchema, type SignUpBody } from '../../../shar
 import { locales } from '../../../shared/vocabulary.ts';
 import { languageNames, useLocale } from '../../i18n/i18n.ts';
 import { signInMessages } from '../../i18n/sign-in.ts';
+import { markFaults } from '../../lib/field-faults.ts';
 import { Button } from '../../ui/button.tsx';
 import { Failure } from '../../ui/failure.tsx';
 import { Field, SelectField } from '../../ui/field.tsx';
@@ -18,7 +19,9 @@ export function SignUpForm({ onDone }: { onDone: (email: string) => void }) {
   const signUp = useSignUp();
   const form = useForm({ resolver: zodResolver(signUpBodySchema), defaultValues: { language } });
   const { errors } = form.formState;
-  const submit = form.handleSubmit((body: SignUpBody) => signUp.mutate(body, { onSuccess: () => onDone(body.email) }));
+  const submit = form.handleSubmit((body: SignUpBody) =>
+    signUp.mutate(body, { onSuccess: () => onDone(body.email), onError: (error) => markFaults(error, form.setError) }),
+  );
   return (
     <form onSubmit={(event) => void submit(event)} noValidate className="grid gap-4">
       <Field
