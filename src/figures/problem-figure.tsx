@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { Figure } from '../../shared/contracts/figure.ts';
 import { BoomDrawing } from './boom-drawing.tsx';
 import { MeasuresDrawing } from './measures-drawing.tsx';
@@ -21,10 +22,12 @@ function Drawing({ figure }: { figure: Figure }) {
 }
 
 /** A problem's or lesson's drawing, with its text equivalent one press away for everyone. */
-export function ProblemFigure({ figure, describe }: { figure: Figure; describe: string }) {
+export function ProblemFigure(props: { figure: Figure; describe: string; caption?: ReactNode }) {
+  const { figure, describe, caption } = props;
   return (
     <figure className="my-4">
       <Drawing figure={figure} />
+      {caption}
       <details className="no-print mt-1 text-sm text-ink-soft">
         <summary className="inline-flex min-h-6 items-center underline underline-offset-4">{describe}</summary>
         <p className="mt-1 max-w-prose">{figure.alt}</p>

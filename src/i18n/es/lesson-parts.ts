@@ -1,6 +1,6 @@
 export const es = {
   worked: 'Ejemplo resuelto',
   tank: 'Junto al tanque',
-  caution: 'Cuidado',
+  caution: 'Tenga cuidado',
   describe: 'Describir el dibujo',
 };

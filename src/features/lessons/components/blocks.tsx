@@ -1,29 +1,54 @@
 import { useStore } from '@nanostores/react';
-import type { ReactNode } from 'react';
+import { useId, type ReactNode } from 'react';
 import type { Figure as Drawing } from '../../../../shared/contracts/figure.ts';
+import type { LabelView } from '../../../../shared/contracts/label.ts';
 import { ProblemFigure } from '../../../figures/problem-figure.tsx';
 import { lessonPartMessages } from '../../../i18n/lesson-parts.ts';
-import { ScrollBox } from '../../../ui/scroll-box.tsx';
+import { DataTable } from '../../../ui/data-table.tsx';
+import { LabelPanel } from '../../../ui/label-panel.tsx';
+import { Sheet } from '../../../ui/sheet.tsx';
 
-/** A drawing in a lesson: a specification drawn to scale, or a drawing of its own as children. */
-export function Figure({ of, caption, children }: { of?: Drawing; caption: string; children?: ReactNode }) {
-  const t = useStore(lessonPartMessages);
+// Text inside a box is no direct child of the lesson, so its paragraphs and lists are spaced here.
+const text =
+  '[&_p]:my-2 [&_ol]:my-2 [&_ol]:list-decimal [&_ol]:pl-[1.6em] [&_ul]:my-2 [&_ul]:list-disc [&_ul]:pl-[1.4em]';
+
+function Box({ title, look, children }: { title: string; look: string; children: ReactNode }) {
+  const heading = useId();
   return (
-    <figure className="not-prose my-6 font-sans">
-      {of ? <ProblemFigure figure={of} describe={t.describe} /> : children}
-      <figcaption className="mt-1 text-sm text-ink-soft">{caption}</figcaption>
-    </figure>
+    <section aria-labelledby={heading} className={`my-7 px-4 py-3.5 wide:px-5 ${look} ${text}`}>
+      <h2 id={heading} className="text-[1.1rem]">
+        {title}
+      </h2>
+      {children}
+    </section>
   );
 }
 
-/** A worked example, framed; its sums are laid out line by line. */
+/** A drawing in a lesson: one of the shared kinds given as data, or drawn for this lesson and given as a child. */
+export function Figure({ of, caption, children }: { of?: Drawing; caption: string; children?: ReactNode }) {
+  const t = useStore(lessonPartMessages);
+  const under = <figcaption className="mt-1 max-w-[40rem] text-sm text-ink-soft">{caption}</figcaption>;
+  return (
+    <div className="my-6 font-sans">
+      {of ? (
+        <ProblemFigure figure={of} describe={t.describe} caption={under} />
+      ) : (
+        <figure>
+          {children}
+          {under}
+        </figure>
+      )}
+    </div>
+  );
+}
+
+/** One problem worked from what is known to the answer and its check. */
 export function WorkedExample({ children }: { children: ReactNode }) {
   const t = useStore(lessonPartMessages);
   return (
-    <section className="my-6 border border-rule bg-sheet px-4 py-3 wide:px-5">
-      <h2 className="mt-0">{t.worked}</h2>
+    <Box title={t.worked} look="border border-t-2 border-rule border-t-dye bg-sheet">
       {children}
-    </section>
+    </Box>
   );
 }
 
@@ -31,10 +56,9 @@ export function WorkedExample({ children }: { children: ReactNode }) {
 export function AtTheTank({ children }: { children: ReactNode }) {
   const t = useStore(lessonPartMessages);
   return (
-    <section className="my-6 border-l-4 border-brass bg-brass-wash px-4 py-3 font-sans">
-      <h2 className="mt-0">{t.tank}</h2>
+    <Box title={t.tank} look="border-l-4 border-brass bg-brass-wash font-sans">
       {children}
-    </section>
+    </Box>
   );
 }
 
@@ -42,66 +66,55 @@ export function AtTheTank({ children }: { children: ReactNode }) {
 export function Caution({ children }: { children: ReactNode }) {
   const t = useStore(lessonPartMessages);
   return (
-    <section className="my-6 border-l-4 border-clay bg-clay-wash px-4 py-3 font-sans">
-      <h2 className="mt-0">{t.caution}</h2>
+    <Box title={t.caution} look="border-l-4 border-clay bg-clay-wash font-sans">
       {children}
-    </section>
+    </Box>
   );
 }
 
-/** Steps in order, numbered by the list inside. */
+/** Steps in order; its child is a numbered list. */
 export function Steps({ children }: { children: ReactNode }) {
-  return <div className="my-5 border-y border-rule py-1 font-sans">{children}</div>;
+  return <div className={`my-5 max-w-[40rem] border-y border-rule py-1 font-sans ${text}`}>{children}</div>;
 }
 
-/** A figure to change by hand. */
+/** A sheet on which the reader changes something and sees what follows. */
 export function TryIt({ title, children }: { title: string; children: ReactNode }) {
+  const heading = useId();
   return (
-    <section className="not-prose my-6 border border-rule bg-sheet px-4 py-4 font-sans wide:px-5">
-      <h2 className="mb-3 text-[1.05rem]">{title}</h2>
+    <Sheet aria-labelledby={heading} className="my-7 font-sans">
+      <h2 id={heading} className="mb-3 font-sans text-base tracking-normal">
+        {title}
+      </h2>
       {children}
-    </section>
+    </Sheet>
   );
 }
 
-/** A side-by-side table. */
-export function Compare({
-  caption,
-  head,
-  rows,
-}: {
+interface CompareProps {
   caption: string;
   head: readonly string[];
   rows: readonly (readonly string[])[];
-}) {
+}
+
+/** Things side by side: a table whose first column heads its rows. */
+export function Compare({ caption, head, rows }: CompareProps) {
+  const columns = head.map((name, index) => ({
+    key: name,
+    head: name,
+    cell: (row: readonly string[]) => row[index] ?? '',
+  }));
   return (
-    <ScrollBox label={caption} className="not-prose my-6 font-sans">
-      <table className="w-full border-collapse text-left">
-        <caption className="mb-1 text-left font-semibold">{caption}</caption>
-        <thead>
-          <tr>
-            {head.map((text) => (
-              <th key={text} scope="col" className="border-b border-rule px-2 py-1.5 text-sm text-ink-soft">
-                {text}
-              </th>
-            ))}
-          </tr>
-        </thead>
-        <tbody>
-          {rows.map(([first, ...rest]) => (
-            <tr key={first}>
-              <th scope="row" className="border-b border-rule px-2 py-1.5 align-top font-semibold">
-                {first}
-              </th>
-              {rest.map((text) => (
-                <td key={text} className="border-b border-rule px-2 py-1.5 align-top">
-                  {text}
-                </td>
-              ))}
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </ScrollBox>
+    <div className="my-6 font-sans text-base leading-snug">
+      <DataTable caption={caption} captionShown columns={columns} rows={rows} rowKey={(row) => String(row[0])} />
+    </div>
+  );
+}
+
+/** A practice label as a problem would show it. */
+export function PracticeLabel({ label }: { label: LabelView }) {
+  return (
+    <div className="my-6 max-w-[28rem] font-sans">
+      <LabelPanel label={label} />
+    </div>
   );
 }

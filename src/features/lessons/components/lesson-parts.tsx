@@ -3,7 +3,7 @@ import type { ComponentProps } from 'react';
 import { Link } from 'react-router';
 import { lessonMessages } from '../../../i18n/lessons.ts';
 import { ScrollBox } from '../../../ui/scroll-box.tsx';
-import { AtTheTank, Caution, Compare, Figure, Steps, TryIt, WorkedExample } from './blocks.tsx';
+import { AtTheTank, Caution, Compare, Figure, PracticeLabel, Steps, TryIt, WorkedExample } from './blocks.tsx';
 import { Checkpoint } from './checkpoint.tsx';
 
 /** Links inside the product stay in it; others open as links do. */
@@ -35,6 +35,7 @@ export const lessonParts = {
   Checkpoint,
   Compare,
   Figure,
+  PracticeLabel,
   Steps,
   TryIt,
   WorkedExample,
