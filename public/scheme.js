@@ -2,6 +2,6 @@
 try {
   var chosen = localStorage.getItem('tankmark.scheme');
   if (chosen === 'light' || chosen === 'dark') document.documentElement.dataset.scheme = chosen;
-} catch (error) {
+} catch {
   // Storage is closed to us: the system's look it is.
 }

@@ -16,7 +16,7 @@ import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import { postgresBin, postgresIds } from './debian.mjs';
 import { freePort } from './ports.mjs';
-import { dataPath, Plain, say } from './project.mjs';
+import { dataPath, Plain } from './project.mjs';
 import { cleanEnv, must, run } from './run.mjs';
 
 const startSeconds = 30;

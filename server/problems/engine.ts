@@ -103,8 +103,3 @@ export function partOf(problem: Problem, key: PartKey): Part | undefined {
 export function partsGivenEarlier(problem: Problem, earlier: Earlier): readonly Part[] {
   return problem.family.parts(problem.given, earlier);
 }
-
-/** The exact answer of a numeric part; null for choice and order parts. */
-export function exactAnswer(part: Part): Quantity | null {
-  return isNumeric(part) ? part.answer : null;
-}

@@ -102,7 +102,7 @@ function checkTexts(family: Family<unknown>, problem: Problem): void {
     if (family.figure) expect((told.figure as { alt: string }).alt.length, where).toBeGreaterThan(20);
   }
   const told = describe(problem, 'en');
-  const last = problem.parts.filter(isNumeric).at(-1);
+  const last = problem.parts.findLast(isNumeric);
   if (last) expect(told.solution.join(' '), `${where}: solution reaches the answer`).toContain(roundedAnswer(last).en);
   for (const part of problem.parts) {
     for (const answer of revealing(problem, part.key)) {

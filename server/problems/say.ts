@@ -22,7 +22,7 @@ function sentence(locale: Locale) {
 
 /** Template tags: en`Take off ${area}.` writes the area as US English does. */
 export const en = sentence('en');
-/** The same in Spanish: es`Reste ${area}.` */
+/** The same tag for Spanish. */
 export const es = sentence('es');
 
 /** A quantity rounded to at most `maxPlaces`, for a sentence. */

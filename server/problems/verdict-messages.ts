@@ -228,11 +228,3 @@ export const unreadableMessages: Record<ParseProblem | 'no-such-option' | 'not-t
 };
 /** Codes of what could not be read. */
 export type UnreadableCode = keyof typeof unreadableMessages;
-
-/** A quantity in both languages, rounded to at most `maxPlaces`. */
-export function bothLanguages(value: Quantity, maxPlaces: number): Text {
-  return {
-    en: formatQuantity(value, { locale: 'en', maxPlaces }),
-    es: formatQuantity(value, { locale: 'es', maxPlaces }),
-  };
-}

@@ -13,7 +13,6 @@ export type Expression =
       readonly places?: number;
     }
   | { readonly is: 'number'; readonly value: Rational; readonly maxPlaces: number }
-  | { readonly is: 'words'; readonly text: Text }
   | { readonly is: 'joined'; readonly sign: '×' | '+' | '−' | '÷' | '=' | '≈'; readonly items: readonly Expression[] }
   | { readonly is: 'over'; readonly top: Expression; readonly bottom: Expression }
   | { readonly is: 'grouped'; readonly item: Expression }
@@ -50,10 +49,6 @@ export function struck(value: Quantity, maxPlaces = 4): Expression {
 export function number(value: Rational | number | string, maxPlaces = 6): Expression {
   return { is: 'number', value: rational(value), maxPlaces };
 }
-/** Words inside an expression, for relations: "length", "width". */
-export function words(en: string, es: string): Expression {
-  return { is: 'words', text: { en, es } };
-}
 /** A product. */
 export function times(...items: Expression[]): Expression {
   return { is: 'joined', sign: '×', items };
@@ -70,10 +65,6 @@ export function minus(...items: Expression[]): Expression {
 export function dividedBy(...items: Expression[]): Expression {
   return { is: 'joined', sign: '÷', items };
 }
-/** A chain of equalities inside one line: 0.2 × 128 = 25.6. */
-export function equals(...items: Expression[]): Expression {
-  return { is: 'joined', sign: '=', items };
-}
 /** Equal after rounding: 100.48 sq ft ≈ 100 sq ft. */
 export function about(exact: Expression, rounded: Expression): Expression {
   return { is: 'joined', sign: '≈', items: [exact, rounded] };
@@ -86,11 +77,11 @@ export function over(top: Expression, bottom: Expression): Expression {
 export function grouped(item: Expression): Expression {
   return { is: 'grouped', item };
 }
-/** A square root. */
+/** A square root: the law of pressure and flow. @public */
 export function root(item: Expression): Expression {
   return { is: 'root', item };
 }
-/** A square. */
+/** A square: the same law turned round. @public */
 export function squared(item: Expression): Expression {
   return { is: 'squared', item };
 }
@@ -127,8 +118,6 @@ export function toTex(item: Expression, locale: Locale): string {
       return texQuantity(item, locale);
     case 'number':
       return texNumber(formatNumber(item.value, { maxPlaces: item.maxPlaces, locale }));
-    case 'words':
-      return texText(item.text[locale]);
     case 'joined':
       return item.items.map((one) => toTex(one, locale)).join(texSigns[item.sign]);
     case 'over':
@@ -154,8 +143,6 @@ export function toPlain(item: Expression, locale: Locale): string {
       return formatQuantity(item.value, { maxPlaces: item.maxPlaces, places: item.places, locale });
     case 'number':
       return formatNumber(item.value, { maxPlaces: item.maxPlaces, locale });
-    case 'words':
-      return item.text[locale];
     case 'joined':
       return item.items.map((one) => toPlain(one, locale)).join(` ${item.sign} `);
     case 'over':

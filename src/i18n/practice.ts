@@ -20,6 +20,7 @@ export const practiceMessages = i18n('practice', {
   couldNotSave: 'The server cannot be reached. Your answer is kept here: press Check again when you are connected.',
   firstCounts: 'First answers count for your level; tries after it are practice.',
   answer: params('Answer: {answer}'),
+  answerFirst: params('Answer part ({part}) first. Going on to a part closes the ones before it.'),
   hint: params('Hint {number} of 3'),
   hintShown: params('Hint {number}'),
   giveUp: 'Show the worked solution',

@@ -3,6 +3,9 @@ import { eq } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { ability, answer, slipCount, topicLevel } from '../../server/db/schema/practice.ts';
 import type { LevelView, ProblemView, ProgressView } from '../../shared/contracts/practice.ts';
+import { roundedAnswer } from '../../server/problems/answer-text.ts';
+import { partsGivenEarlier } from '../../server/problems/engine.ts';
+import type { NumberPart } from '../../server/problems/family.ts';
 import type { PartKey } from '../../shared/vocabulary.ts';
 import { signedInPerson, type SignedIn } from '../support/factories.ts';
 import { nextProblem, replyOf, rightResponse, secretProblem, send, startDrill } from '../support/practice.ts';
@@ -83,7 +86,7 @@ describe('working a problem', () => {
     );
     expect(replies.map((reply) => reply.status)).toEqual([200, 200, 200, 200, 200]);
     const rows = await rowsOf(person.id);
-    expect(rows.map((row) => row.attempt).sort()).toEqual([1, 2, 3, 4, 5]);
+    expect(rows.map((row) => row.attempt).sort((a, b) => a - b)).toEqual([1, 2, 3, 4, 5]);
     expect(rows.filter((row) => row.isFirst)).toHaveLength(1);
   });
 
@@ -182,6 +185,33 @@ describe('working a problem', () => {
     expect(progress).toMatchObject({ answered: 5, right: 5, slips: [] });
     expect(progress.days).toHaveLength(1);
     expect(progress.seconds).toBe(60);
+  });
+});
+
+describe('parts in their order', () => {
+  test('a later part waits for the first; going on closes the one before, and the own wrong answer is carried', async () => {
+    const { person, client } = await trainee();
+    const { shown } = await startDrill(client, ['rate'], 2);
+    const problem = await secretProblem(app.database, person.id, shown.id);
+    const early = await send(client, { id: shown.id, part: 'b', response: rightResponse(problem, 'b') });
+    expect(early.status).toBe(409);
+    expect(early.body).toMatchObject({ code: 'out-of-turn' });
+    expect(await rowsOf(person.id)).toEqual([]);
+    const slip = problem.slips.find((live) => live.part === 'a');
+    if (!slip) throw new Error('no slip in part a');
+    await send(client, { id: shown.id, part: 'a', response: { kind: 'number', text: slip.value.toFraction() } });
+    const own = partsGivenEarlier(problem, {
+      a: { value: slip.value, unit: (problem.parts[0] as NumberPart).answer.unit },
+    })[1] as NumberPart;
+    const response = { kind: 'number' as const, text: roundedAnswer(own).en };
+    const reply = replyOf(await send(client, { id: shown.id, part: 'b', response }));
+    expect(reply.parts[1]?.attempts).toMatchObject([{ verdict: 'carried' }]);
+    expect(reply.parts[0]).toMatchObject({
+      state: 'closed',
+      answerText: roundedAnswer(problem.parts[0] as NumberPart).en,
+    });
+    const late = await send(client, { id: shown.id, part: 'a', response: rightResponse(problem, 'a') });
+    expect(late.body).toMatchObject({ code: 'part-closed' });
   });
 });
 

@@ -31,7 +31,13 @@ afterEach(async () => {
 
 async function send(subject: string, text = 'Hello.'): Promise<void> {
   const transport = nodemailer.createTransport({ host: '127.0.0.1', port: smtpPort, secure: false });
-  await transport.sendMail({ from: 'office@example.test', to: 'ana@example.test', subject, text, html: `<p>${text}</p>` });
+  await transport.sendMail({
+    from: 'office@example.test',
+    to: 'ana@example.test',
+    subject,
+    text,
+    html: `<p>${text}</p>`,
+  });
   transport.close();
 }
 async function list(): Promise<MessageSummary[]> {

@@ -15,7 +15,10 @@ await store.open();
 const smtp = smtpSink(store);
 smtp.on('error', () => undefined);
 const http = mailboxServer(store);
-const ports = { smtp: await listenOnLoopback(smtp, Number(smtpPort)), http: await listenOnLoopback(http, Number(httpPort)) };
+const ports = {
+  smtp: await listenOnLoopback(smtp, Number(smtpPort)),
+  http: await listenOnLoopback(http, Number(httpPort)),
+};
 process.stdout.write(`${JSON.stringify(ports)}\n`);
 
 function stop(): void {

@@ -20,7 +20,11 @@ const fileName = /^[0-9a-f-]{36}\.json$/;
 
 /** Keeps the newest messages as one JSON file each; identifiers are time-ordered, so names sort by age. */
 export function messageStore(folder: string, mostKept: number) {
-  const names = async () => (await readdir(folder)).filter((name) => fileName.test(name)).sort().reverse();
+  const names = async () =>
+    (await readdir(folder))
+      .filter((name) => fileName.test(name))
+      .sort()
+      .reverse();
   const read = async (name: string) => JSON.parse(await readFile(join(folder, name), 'utf8')) as StoredMessage;
   return {
     async open(): Promise<void> {

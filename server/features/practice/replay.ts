@@ -46,7 +46,10 @@ export function earlierFor(standing: Standing, part: PartKey): Partial<Record<Pa
   return ownBefore(standing, part);
 }
 
-/** Takes one more graded answer into the standing. Carried credit also closes the earlier parts it rests on. */
+/**
+ * Takes one more graded answer into the standing. Going on to a part closes the ones before it: what is said of a later part
+ * may rest on their answers.
+ */
 export function take(standing: Standing, attempt: ReplayedAttempt): void {
   const { part, verdict } = attempt.row;
   const list = standing.attempts.get(part) ?? [];
@@ -56,9 +59,7 @@ export function take(standing: Standing, attempt: ReplayedAttempt): void {
     standing.closed.add(part);
     return;
   }
-  if (verdict === 'carried') {
-    for (const earlier of Object.keys(ownBefore(standing, part)) as PartKey[]) standing.closed.add(earlier);
-  }
+  for (const earlier of standing.attempts.keys()) if (earlier < part) standing.closed.add(earlier);
   if (earnsMark(verdict)) standing.closed.add(part);
   // A carried value stays the person's own for the parts after it; a right one is the exact value anyway.
   if (verdict !== 'right' && attempt.graded.value) standing.own[part] = attempt.graded.value;

@@ -77,12 +77,11 @@ export interface RecordWrite {
 /** The values of `recordSql`, in the order of its placeholders. */
 function recordValues(write: RecordWrite): unknown[] {
   const { userId, sequence, ability, problem: own, at, answers, topics, slips, day, closed } = write;
-  return [
-    ...[userId, sequence, ability.mean, ability.variance],
-    ...[own.id, own.family, own.version, own.tier, own.context, at],
-    ...[answers, topics, slips].map((list) => JSON.stringify(list)),
-    ...[day.day, day.answered, day.right, day.seconds, closed],
-  ];
+  const values: unknown[] = [userId, sequence, ability.mean, ability.variance];
+  values.push(own.id, own.family, own.version, own.tier, own.context, at);
+  for (const list of [answers, topics, slips]) values.push(JSON.stringify(list));
+  values.push(day.day, day.answered, day.right, day.seconds, closed);
+  return values;
 }
 
 /** Reads and writes of problems put before people and of the answer log. */

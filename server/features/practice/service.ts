@@ -237,6 +237,8 @@ export function practiceService({ repo, zone, now, newId = () => uuidv7() }: Pra
           return null;
         }
         if (standing.closed.has(part.key)) throw new AppError('part-closed');
+        const skipped = problem.parts.some((one) => one.key < part.key && !standing.attempts.has(one.key));
+        if (skipped) throw new AppError('out-of-turn');
         const earlier = earlierFor(standing, part.key);
         const graded = gradePart({
           problem,

@@ -37,10 +37,12 @@ interface PartBlockProps {
   part: PartView;
   /** Several parts are lettered; a single one is not. */
   lettered: boolean;
+  /** The letter of the part that comes first, while this one has to wait for it. */
+  after: string | null;
 }
 
 /** One part: what is asked, the field, and what grading said of each answer. */
-export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
+export function PartBlock({ problemId, part, lettered, after }: PartBlockProps) {
   const t = useStore(practiceMessages);
   const units = part.kind === 'number' ? part.units : [];
   const [value, keep, forget] = useDraft(`${problemId}.${part.key}`, '');
@@ -63,6 +65,10 @@ export function PartBlock({ problemId, part, lettered }: PartBlockProps) {
   const check = (event: FormEvent) => {
     event.preventDefault();
     if (answer.isPending || closed) return;
+    if (after !== null) {
+      setRefused(t.answerFirst({ part: after }));
+      return;
+    }
     setRefused(null);
     answer.mutate(
       { part: part.key, response: responseFor(part, value, unit), seconds: seconds() },

@@ -44,8 +44,14 @@ function Worksheet({ problem, compact, after }: { problem: ProblemView; compact:
           <LabelPanel label={problem.label} />
         </div>
       )}
-      {problem.parts.map((part) => (
-        <PartBlock key={part.key} problemId={problem.id} part={part} lettered={problem.parts.length > 1} />
+      {problem.parts.map((part, index) => (
+        <PartBlock
+          key={part.key}
+          problemId={problem.id}
+          part={part}
+          lettered={problem.parts.length > 1}
+          after={problem.parts.slice(0, index).find((before) => before.attempts.length === 0)?.key ?? null}
+        />
       ))}
       {current && (
         <div className="flex flex-wrap items-center gap-x-6 gap-y-1 border-t border-rule pt-2">

@@ -17,6 +17,7 @@ export const es = {
   couldNotSave: 'No hay conexión con el servidor. Su respuesta queda aquí: pulse Revisar cuando tenga conexión.',
   firstCounts: 'La primera respuesta cuenta para su nivel; los intentos siguientes son práctica.',
   answer: 'Respuesta: {answer}',
+  answerFirst: 'Responda primero la parte ({part}). Al pasar a una parte se cierran las anteriores.',
   hint: 'Pista {number} de 3',
   hintShown: 'Pista {number}',
   giveUp: 'Mostrar la solución',
