@@ -1,4 +1,3 @@
-import type { Quantity } from '../../shared/quantity/quantity.ts';
 import type { Rational } from '../../shared/quantity/rational.ts';
 import type { PartKey, Tier } from '../../shared/vocabulary.ts';
 import type { Earlier, Family, Part, Slip } from './family.ts';

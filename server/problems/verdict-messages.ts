@@ -1,6 +1,6 @@
 import { formatQuantity, unitWord } from '../../shared/quantity/format.ts';
 import type { ParseProblem } from '../../shared/quantity/parse.ts';
-import { quantity, type Quantity } from '../../shared/quantity/quantity.ts';
+import { quantity } from '../../shared/quantity/quantity.ts';
 import { kindOf, type Kind, type UnitKey } from '../../shared/quantity/units.ts';
 import type { Text } from '../../shared/vocabulary.ts';
 import type { CountPart, NumberPart } from './family.ts';
