@@ -24,9 +24,9 @@ export function AreaLessObstacle() {
           text={`${long} ft`}
           onChange={setLong}
         />
-        <p role="status">
+        <output className="block">
           {text.whole} sq ft − {text.off} sq ft = <b>{text.left} sq ft</b> of grass
-        </p>
+        </output>
       </div>
       <PlanDrawing
         figure={{

@@ -2,54 +2,69 @@ import { useState } from 'react';
 import { DrawingFrame } from '../frame.tsx';
 import { Slider } from './slider.tsx';
 
-const rate = 1.5;
-const inWords = new Intl.NumberFormat('en-US', { maximumFractionDigits: 2 });
+const rateFlOz = 1.5;
+const mostThousands = 8;
+const columns = 4;
+const figures = new Intl.NumberFormat('en-US', { maximumFractionDigits: 3 });
 
-/** Change the area and count the thousands: each takes the label's amount once. */
-export function RateAndArea() {
-  const [area, setArea] = useState(4500);
-  const thousands = area / 1000;
-  const product = inWords.format(thousands * rate);
-  const alt = `${inWords.format(thousands)} squares of 1,000 square feet, each with 1.5 fluid ounces.`;
+/** The lawn as squares of 1,000 sq ft, the last one perhaps begun only; each says what product it takes. */
+function Thousands({ thousands }: { thousands: number }) {
   return (
-    <div>
-      <Slider
-        label="Area of the lawn"
-        value={area}
-        min={500}
-        max={8000}
-        step={250}
-        text={`${inWords.format(area)} sq ft`}
-        onChange={setArea}
-      />
-      <DrawingFrame height={92} alt={alt}>
-        {Array.from({ length: 8 }, (_, index) => {
-          const share = Math.min(Math.max(thousands - index, 0), 1);
-          return (
-            <g key={index} transform={`translate(${6 + index * 42} 8)`}>
-              <rect width="36" height="36" className="fill-sheet stroke-rule-strong" />
-              <rect
-                width={36 * share}
-                height="36"
-                className="fill-turf-wash stroke-turf"
-                strokeWidth={share > 0 ? 1.4 : 0}
-              />
-              {share > 0 && (
-                <text x="18" y="62" textAnchor="middle" fontSize="13">
-                  {inWords.format(share * rate)}
+    <DrawingFrame
+      height={166}
+      alt={`${figures.format(thousands)} squares of 1,000 square feet. A full one takes 1.5 fluid ounces.`}
+    >
+      {Array.from({ length: mostThousands }, (_, index) => {
+        const share = Math.min(Math.max(thousands - index, 0), 1);
+        const x = 4 + (index % columns) * 87;
+        const y = 4 + Math.floor(index / columns) * 83;
+        return (
+          <g key={index} transform={`translate(${x} ${y})`}>
+            <rect width="80" height="76" fill="none" className="stroke-rule" strokeDasharray="4 4" />
+            {share > 0 && (
+              <>
+                <rect width={80 * share} height="76" className="fill-turf-wash stroke-turf" strokeWidth="1.6" />
+                <text x={share < 0.7 ? 80 * share + 5 : 40} y="34" textAnchor={share < 0.7 ? 'start' : 'middle'}>
+                  <tspan fontWeight="600">{figures.format(share * rateFlOz)}</tspan>
                 </text>
-              )}
-            </g>
-          );
-        })}
-        <text x="6" y="86" fontSize="13">
-          fl oz for each square of 1,000 sq ft
-        </text>
-      </DrawingFrame>
-      <p role="status" className="mt-2">
-        {inWords.format(area)} ÷ 1,000 = {inWords.format(thousands)}. {inWords.format(thousands)} × 1.5 fl oz ={' '}
-        <b>{product} fl oz</b>
-      </p>
+                <text x={share < 0.7 ? 80 * share + 5 : 40} y="52" textAnchor={share < 0.7 ? 'start' : 'middle'}>
+                  fl oz
+                </text>
+              </>
+            )}
+          </g>
+        );
+      })}
+    </DrawingFrame>
+  );
+}
+
+/** Change the area and count the thousands: each takes the label's amount of product and of water once. */
+export function RateAndArea() {
+  const [areaSqFt, setAreaSqFt] = useState(4500);
+  const thousands = areaSqFt / 1000;
+  const count = figures.format(thousands);
+  return (
+    <div className="grid items-center gap-x-6 gap-y-3 sm:grid-cols-[14rem_1fr]">
+      <div>
+        <Slider
+          label="Area of the lawn"
+          value={areaSqFt}
+          min={500}
+          max={mostThousands * 1000}
+          step={500}
+          text={`${figures.format(areaSqFt)} sq ft`}
+          onChange={setAreaSqFt}
+        />
+        <output className="block">
+          {figures.format(areaSqFt)} ÷ 1,000 = {count} thousands.
+          <br />
+          {count} × 1.5 fl oz = <b>{figures.format(thousands * rateFlOz)} fl oz</b> of product.
+          <br />
+          {count} × 1 gal = <b>{count} gal</b> of water.
+        </output>
+      </div>
+      <Thousands thousands={thousands} />
     </div>
   );
 }
