@@ -24,12 +24,15 @@ function Box({ title, look, children }: { title: string; look: string; children:
   );
 }
 
-/** A drawing in a lesson: one of the shared kinds given as data, or drawn for this lesson and given as a child. */
+/**
+ * A drawing in a lesson, on a sheet: one of the shared kinds given as data, or drawn for this lesson and given as a child.
+ * What the reader can change brings its own sheet, which then is the figure's.
+ */
 export function Figure({ of, caption, children }: { of?: Drawing; caption: string; children?: ReactNode }) {
   const t = useStore(lessonPartMessages);
-  const under = <figcaption className="mt-1 max-w-[40rem] text-sm text-ink-soft">{caption}</figcaption>;
+  const under = <figcaption className="mt-2 max-w-[36rem] text-[0.95rem] leading-snug">{caption}</figcaption>;
   return (
-    <div className="my-6 font-sans">
+    <div className="my-6 border border-rule bg-sheet px-4 py-4 font-sans wide:px-6 [&>figure]:my-0">
       {of ? (
         <ProblemFigure figure={of} describe={t.describe} caption={under} />
       ) : (
@@ -81,7 +84,7 @@ export function Steps({ children }: { children: ReactNode }) {
 export function TryIt({ title, children }: { title: string; children: ReactNode }) {
   const heading = useId();
   return (
-    <Sheet aria-labelledby={heading} className="my-7 font-sans">
+    <Sheet aria-labelledby={heading} className="my-7 font-sans in-[figure]:my-0 in-[figure]:border-0 in-[figure]:p-0">
       <h2 id={heading} className="mb-3 font-sans text-base tracking-normal">
         {title}
       </h2>
