@@ -10,7 +10,7 @@ export function LabelPanel({ label }: { label: LabelView }) {
       <p className="bg-ink px-3 py-1 text-xs font-bold tracking-wide text-sheet">{label.notice}</p>
       <header className="flex flex-wrap items-baseline justify-between gap-x-3 border-b-2 border-ink px-3 py-2">
         <p className="font-serif text-xl leading-none font-bold">{label.name}</p>
-        <p className="text-right">
+        <p className="ml-auto text-right">
           {label.type}
           <span className="block text-xs text-ink-soft">{label.number}</span>
         </p>

@@ -15,7 +15,15 @@ function stateChip(state: LevelView['state'], word: string) {
 }
 
 function soft(text: string) {
-  return <span className="text-ink-soft">{text}</span>;
+  return <span className="text-sm whitespace-normal text-ink-soft">{text}</span>;
+}
+
+function withRange(fill: string, range: string) {
+  return (
+    <>
+      <b>{fill}</b> <span className="inline-block text-sm text-ink-soft wide:ml-2 wide:min-w-20">{range}</span>
+    </>
+  );
 }
 
 /** Every topic's level with its likely range; blank where there are too few answers to say. */
@@ -39,14 +47,10 @@ export function LevelTable({ levels }: { levels: readonly LevelView[] }) {
           key: 'fill',
           head: t.fill,
           number: true,
-          cell: (level) => (level.fill === null ? '–' : inHundred(level.fill)),
-        },
-        {
-          key: 'range',
-          head: t.range,
-          number: true,
-          cell: ({ range }) =>
-            range ? t.range2({ low: inHundred(range.low), high: inHundred(range.high) }) : soft(t.blank),
+          cell: ({ fill, range }) =>
+            fill !== null && range
+              ? withRange(String(inHundred(fill)), t.range2({ low: inHundred(range.low), high: inHundred(range.high) }))
+              : soft(t.blank),
         },
         { key: 'answers', head: t.answers, number: true, cell: (level) => level.answers },
       ]}
