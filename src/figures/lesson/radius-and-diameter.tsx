@@ -4,7 +4,7 @@ import { useHatching } from '../grounds.tsx';
 import { Slider } from './slider.tsx';
 
 const pi = 3.14;
-const mostAcrossFt = 30;
+const mostAcrossFt = 24;
 const height = 290;
 /** The circle that the slip stands for is twice as wide as the bed, and the widest one just fits. */
 const unitsPerFoot = (height - 8) / (mostAcrossFt * 2);
@@ -32,8 +32,7 @@ function Circles({ acrossFt }: { acrossFt: number }) {
         strokeWidth="1.8"
       />
       <circle cx={centerX} cy={centerY} r="3" className="fill-ink" />
-      <rect x={centerX - 62} y={centerY - 32} width="124" height="21" rx="2" className="fill-sheet" opacity=".92" />
-      <text x={centerX} y={centerY - 16} textAnchor="middle" fontWeight="600">
+      <text x={centerX} y={centerY - radius - 7} textAnchor="middle" fontWeight="600">
         radius {acrossFt / 2} ft
       </text>
     </DrawingFrame>

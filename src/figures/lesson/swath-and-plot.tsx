@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { DrawingFrame, drawingWidth } from '../frame.tsx';
+import { DrawingFrame } from '../frame.tsx';
 import { useHatching } from '../grounds.tsx';
 import { Slider } from './slider.tsx';
 
@@ -46,7 +46,7 @@ function Strip({ swathFt, lengthFt }: { swathFt: number; lengthFt: number }) {
       <text x={(left + right) / 2} y={below + 5} textAnchor="middle" fontWeight="600">
         {lengthFt} ft
       </text>
-      <text x={drawingWidth} y={134} textAnchor="end" fontSize="14" className="fill-ink-soft">
+      <text x={left} y={134} fontSize="15" className="fill-ink-soft">
         width drawn {widthTimes} times as large
       </text>
     </DrawingFrame>
