@@ -43,10 +43,14 @@ function Slips({ sample }: { sample: ProofSample }) {
         { key: 'slip', head: t.slip, cell: ({ key }) => key },
         { key: 'part', head: t.part, cell: ({ part }) => `(${part})` },
         { key: 'gives', head: t.gives, number: true, cell: ({ answer }) => answer },
-        { key: 'says', head: t.says, cell: ({ message }) => message },
+        { key: 'says', head: t.says, cell: ({ message }) => roomy(message) },
       ]}
     />
   );
+}
+
+function roomy(text: string) {
+  return <span className="block min-w-56">{text}</span>;
 }
 
 function unbroken(text: string) {

@@ -4,7 +4,7 @@ import { expect, test } from 'vitest';
 import { MailText } from './mail-text.tsx';
 
 test('addresses of this site can be followed, others stay text', () => {
-  const text = `Confirm: ${window.location.origin}/confirm?kind=confirm&token=abc\nNot ours: https://other.test/confirm?token=abc`;
+  const text = `Confirm: ${window.location.origin}/confirm?kind=confirm&token=abc\nNot ours: https://other.test/confirm?token=abc ${window.location.origin}//third.test/confirm`;
   render(
     <MemoryRouter>
       <MailText text={text} />

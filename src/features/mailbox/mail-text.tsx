@@ -11,7 +11,10 @@ export function MailText({ text }: { text: string }) {
         const key = `${String(index)} ${piece}`;
         const url = address.test(piece) && URL.canParse(piece) ? new URL(piece) : null;
         // The demonstration may be reached by another name than the one it writes into its messages.
-        const ours = url !== null && ['localhost', '127.0.0.1', window.location.hostname].includes(url.hostname);
+        const ours =
+          url !== null &&
+          !url.pathname.startsWith('//') &&
+          ['localhost', '127.0.0.1', window.location.hostname].includes(url.hostname);
         if (!ours) return <span key={key}>{piece}</span>;
         return (
           <Link key={key} to={`${url.pathname}${url.search}`}>

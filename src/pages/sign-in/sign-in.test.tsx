@@ -58,7 +58,18 @@ async function fillIn(user: ReturnType<typeof userEvent.setup>) {
 
 test('only addresses of this site are gone back to', () => {
   expect(safeNext('/drills?topic=area')).toBe('/drills?topic=area');
-  const others = ['//other.test/', '/\\other.test', 'https://other.test', 'javascript:alert(1)', '', 'drills', null];
+  const others = [
+    '//other.test/',
+    '/\\other.test',
+    '/\t/other.test',
+    '/\n/other.test',
+    '/..//other.test',
+    'https://other.test',
+    'javascript:alert(1)',
+    '',
+    'drills',
+    null,
+  ];
   for (const other of others) expect(safeNext(other), String(other)).toBe('/today');
 });
 

@@ -7,9 +7,13 @@ import { paths } from '../../paths.ts';
 import { NarrowPage } from '../../ui/narrow-page.tsx';
 import { Notice } from '../../ui/notice.tsx';
 
-/** Only a page of ours: an address that starts with one slash. */
+/** Only a page of ours. The address is read as a browser reads it: "/<tab>/other" leads to another site, too. */
 export function safeNext(next: string | null): string {
-  return next !== null && /^\/(?![/\\])/.test(next) ? next : paths.today;
+  const { origin } = window.location;
+  if (next === null || !next.startsWith('/') || !URL.canParse(next, origin)) return paths.today;
+  const url = new URL(next, origin);
+  const isOurs = url.origin === origin && !url.pathname.startsWith('//');
+  return isOurs ? `${url.pathname}${url.search}${url.hash}` : paths.today;
 }
 
 export default function SignIn() {
