@@ -1,15 +1,7 @@
 import type { PlanShape, Point } from '../../shared/contracts/figure.ts';
-import { textWidth } from './frame.tsx';
+import { meet, plateBox, type Box } from './dimension-places.ts';
 import type { PlanLayout } from './plan-layout.ts';
 
-interface Box {
-  left: number;
-  top: number;
-  right: number;
-  bottom: number;
-}
-
-const plateHeight = 20;
 /** Kept clear round a smaller shape: its dimension lines and their text stand there. */
 const clearance = 30;
 /** Where a name is tried, as shares of the shape's width and height: the middle first. */
@@ -44,15 +36,6 @@ function boxOf(shape: PlanShape<string>, layout: PlanLayout): Box {
   return { left: Math.min(...xs), top: Math.min(...ys), right: Math.max(...xs), bottom: Math.max(...ys) };
 }
 
-function meet(a: Box, b: Box, room: number): boolean {
-  return a.left < b.right + room && a.right > b.left - room && a.top < b.bottom + room && a.bottom > b.top - room;
-}
-
-function plate([x, y]: Point, text: string): Box {
-  const half = textWidth(text) / 2;
-  return { left: x - half, right: x + half, top: y - plateHeight / 2, bottom: y + plateHeight / 2 };
-}
-
 function inside(inner: Box, outer: Box): boolean {
   return (
     inner.left >= outer.left && inner.right <= outer.right && inner.top >= outer.top && inner.bottom <= outer.bottom
@@ -63,7 +46,13 @@ function inside(inner: Box, outer: Box): boolean {
  * Where each shape's name stands on the paper: inside its shape, clear of the shapes drawn over it. Null for a shape
  * without a name, or without room for one: its name then stands in the text equivalent alone.
  */
-export function namePlaces(shapes: readonly PlanShape<string>[], layout: PlanLayout): (Point | null)[] {
+export function namePlaces(options: {
+  shapes: readonly PlanShape<string>[];
+  layout: PlanLayout;
+  /** Plates of the dimensions' texts. */
+  texts: readonly Box[];
+}): (Point | null)[] {
+  const { shapes, layout, texts } = options;
   const boxes = shapes.map((shape) => boxOf(shape, layout));
   return shapes.map((shape, index) => {
     const box = boxes[index];
@@ -73,8 +62,12 @@ export function namePlaces(shapes: readonly PlanShape<string>[], layout: PlanLay
     const over = boxes.slice(index + 1);
     const at = tries
       .map(([x, y]): Point => [box.left + (box.right - box.left) * x, box.top + (box.bottom - box.top) * y])
-      .filter((point) => inside(plate(point, name), box));
-    const free = (room: number) => at.find((point) => !over.some((other) => meet(plate(point, name), other, room)));
+      .filter((point) => inside(plateBox(point, name), box));
+    const free = (room: number) =>
+      at.find((point) => {
+        const box = plateBox(point, name);
+        return !over.some((other) => meet(box, other, room)) && !texts.some((other) => meet(box, other, 1));
+      });
     return free(clearance) ?? free(2) ?? null;
   });
 }

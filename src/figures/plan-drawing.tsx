@@ -2,7 +2,8 @@ import type { PlanArrow, PlanDimension, PlanFigure, PlanShape, Point } from '../
 import { DrawingFrame, drawingWidth, textWidth } from './frame.tsx';
 import { groundFill, isHatched, useHatching } from './grounds.tsx';
 import { namePlaces } from './name-places.ts';
-import { dimensionGap, outward, planLayout, type PlanLayout } from './plan-layout.ts';
+import { placeDimensions, plateBox, type PlacedDimension } from './dimension-places.ts';
+import { planLayout, type PlanLayout } from './plan-layout.ts';
 
 /** Text on a plate of the paper's own color, kept inside the drawing. */
 function Plate({ at, text, bold = false }: { at: Point; text: string; bold?: boolean }) {
@@ -41,29 +42,19 @@ function Outline({
   return <rect x={x} y={y} width={shape.width * layout.scale} height={shape.height * layout.scale} {...look} />;
 }
 
-function Dimension({ dimension, layout }: { dimension: PlanDimension<string>; layout: PlanLayout }) {
-  const [nx, ny] = outward(dimension);
-  const gap = dimension.place === 'outside' ? dimensionGap : 0;
-  const shift = ([x, y]: Point): Point => [x + nx * gap, y + ny * gap];
-  const from = shift(layout.at(dimension.from));
-  const to = shift(layout.at(dimension.to));
+function Dimension({ dimension, placed }: { dimension: PlanDimension<string>; placed: PlacedDimension }) {
+  const { from, to, normal, at } = placed;
+  const [nx, ny] = normal;
   const tick = ([x, y]: Point) => `M${x - nx * 5} ${y - ny * 5}L${x + nx * 5} ${y + ny * 5}`;
-  const line = `M${from.join(' ')}L${to.join(' ')}`;
-  const center: Point = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
-  // Beside an upright line the text stands clear of it; on a level one it sits on the line.
-  const upright = Math.abs(nx) > 0.5 && dimension.place === 'outside';
-  const at: Point = upright ? [center[0] + Math.sign(nx) * (textWidth(dimension.text) / 2 + 6), center[1]] : center;
-  const fits = Math.hypot(to[0] - from[0], to[1] - from[1]) > textWidth(dimension.text) + 14;
-  const beside: Point = upright || fits ? at : [at[0] + nx * 14, at[1] + (ny === 0 ? -14 : ny * 14)];
   return (
     <g>
       <path
-        d={`${line}${tick(from)}${tick(to)}`}
+        d={`M${from.join(' ')}L${to.join(' ')}${tick(from)}${tick(to)}`}
         className="stroke-ink"
         fill="none"
         strokeDasharray={dimension.dashed ? '5 4' : undefined}
       />
-      <Plate at={beside} text={dimension.text} />
+      <Plate at={at} text={dimension.text} />
     </g>
   );
 }
@@ -85,7 +76,9 @@ function Arrow({ arrow, layout }: { arrow: PlanArrow<string>; layout: PlanLayout
 export function PlanDrawing({ figure }: { figure: PlanFigure }) {
   const layout = planLayout(figure);
   const hatching = useHatching();
-  const names = namePlaces(figure.shapes, layout);
+  const placed = placeDimensions(figure.dimensions, layout);
+  const texts = placed.map(({ at }, index) => plateBox(at, figure.dimensions[index]?.text ?? ''));
+  const names = namePlaces({ shapes: figure.shapes, layout, texts });
   return (
     <DrawingFrame height={layout.height} alt={figure.alt}>
       {hatching.defs}
@@ -107,8 +100,8 @@ export function PlanDrawing({ figure }: { figure: PlanFigure }) {
       {figure.arrows?.map((arrow) => (
         <Arrow key={JSON.stringify(arrow)} arrow={arrow} layout={layout} />
       ))}
-      {figure.dimensions.map((dimension) => (
-        <Dimension key={JSON.stringify(dimension)} dimension={dimension} layout={layout} />
+      {figure.dimensions.map((dimension, index) => (
+        <Dimension key={JSON.stringify(dimension)} dimension={dimension} placed={placed[index] as PlacedDimension} />
       ))}
     </DrawingFrame>
   );

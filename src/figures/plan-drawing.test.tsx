@@ -1,0 +1,84 @@
+import { render, screen } from '@testing-library/react';
+import { describe, expect, test } from 'vitest';
+import type { Figure, PlanFigure } from '../../shared/contracts/figure.ts';
+import { drawingWidth } from './frame.tsx';
+import { meet, placeDimensions, plateBox } from './dimension-places.ts';
+import { namePlaces } from './name-places.ts';
+import { PlanDrawing } from './plan-drawing.tsx';
+import { planLayout } from './plan-layout.ts';
+import { ProblemFigure } from './problem-figure.tsx';
+
+const lawn: PlanFigure = {
+  kind: 'plan',
+  width: 65,
+  height: 44,
+  shapes: [
+    { form: 'rect', x: 0, y: 0, width: 65, height: 44, ground: 'turf', name: 'grass' },
+    { form: 'rect', x: 8, y: 14, width: 29, height: 16, ground: 'soil', name: 'playground' },
+    { form: 'rect', x: 45, y: 0, width: 10, height: 13, ground: 'building', name: 'shed' },
+  ],
+  dimensions: [
+    { from: [0, 0], to: [65, 0], text: '65 ft', place: 'outside', side: 'left' },
+    { from: [65, 0], to: [65, 44], text: '44 ft', place: 'outside', side: 'left' },
+    { from: [8, 14], to: [37, 14], text: '29 ft', place: 'outside', side: 'left' },
+    { from: [37, 14], to: [37, 30], text: '16 ft', place: 'outside', side: 'left' },
+    { from: [55, 0], to: [55, 13], text: '13 ft', place: 'outside', side: 'left' },
+    { from: [55, 13], to: [45, 13], text: '10 ft', place: 'outside', side: 'left' },
+  ],
+  alt: 'A lawn 65 feet by 44 feet with a playground and a shed.',
+};
+
+describe('a plan', () => {
+  test('is true to scale', () => {
+    const layout = planLayout(lawn);
+    const [x0, y0] = layout.at([0, 0]);
+    const [x1, y1] = layout.at([65, 44]);
+    expect((x1 - x0) / (y1 - y0)).toBeCloseTo(65 / 44, 6);
+  });
+  test('no text covers another or leaves the paper', () => {
+    const layout = planLayout(lawn);
+    const placed = placeDimensions(lawn.dimensions, layout);
+    const texts = placed.map(({ at }, index) => plateBox(at, lawn.dimensions[index]?.text ?? ''));
+    const names = namePlaces({ shapes: lawn.shapes, layout, texts }).flatMap((at, index) =>
+      at ? [plateBox(at, lawn.shapes[index]?.name ?? '')] : [],
+    );
+    expect(names.length).toBeGreaterThanOrEqual(2);
+    const all = [...texts, ...names];
+    all.forEach((box, index) => {
+      expect(box.left).toBeGreaterThanOrEqual(0);
+      expect(box.right).toBeLessThanOrEqual(drawingWidth);
+      expect(box.bottom).toBeLessThanOrEqual(layout.height);
+      for (const other of all.slice(index + 1)) expect(meet(box, other, 0)).toBe(false);
+    });
+  });
+  test('is one picture with a text equivalent, and the text can be opened', () => {
+    render(<ProblemFigure figure={lawn} describe="Describe the drawing" />);
+    expect(screen.getByRole('img', { name: lawn.alt })).toBeInTheDocument();
+    expect(screen.getByText('Describe the drawing')).toBeInTheDocument();
+  });
+  test('text stays readable: at 285 px, the column of the narrowest phone, 15 units are 12 px or more', () => {
+    expect((15 * 285) / drawingWidth).toBeGreaterThanOrEqual(12);
+  });
+  test('every dimension is written', () => {
+    render(<PlanDrawing figure={lawn} />);
+    for (const { text } of lawn.dimensions) expect(screen.getByText(text)).toBeInTheDocument();
+  });
+});
+
+const others: Figure[] = [
+  {
+    kind: 'boom',
+    nozzles: 6,
+    spacing: '20 in',
+    flow: '26 fl oz in 30 s',
+    speed: '3.5 mph',
+    alt: 'A boom with six nozzles.',
+  },
+  { kind: 'tank', level: 1, capacity: '15 gal', alt: 'A tank of 15 gallons, full.' },
+  { kind: 'nozzle-patterns', patterns: [{ pattern: 'flat-fan', name: 'Flat fan' }], alt: 'A flat fan.' },
+  { kind: 'measures', tools: [{ tool: 'tablespoon', name: 'tablespoon' }], alt: 'A tablespoon.' },
+];
+test.each(others)('a $kind is drawn with its text equivalent', (figure) => {
+  render(<ProblemFigure figure={figure} describe="Describe the drawing" />);
+  expect(screen.getByRole('img', { name: figure.alt })).toBeInTheDocument();
+});
