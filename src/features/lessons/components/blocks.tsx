@@ -24,11 +24,19 @@ function Box({ title, look, children }: { title: string; look: string; children:
   );
 }
 
+interface FigureProps {
+  caption: string;
+  of?: Drawing;
+  children?: ReactNode;
+  /** Text equivalent of a child, one press away for everyone; what is given as data brings its own. */
+  inWords?: string;
+}
+
 /**
  * A drawing in a lesson, on a sheet: one of the shared kinds given as data, or drawn for this lesson and given as a child.
  * What the reader can change brings its own sheet, which then is the figure's.
  */
-export function Figure({ of, caption, children }: { of?: Drawing; caption: string; children?: ReactNode }) {
+export function Figure({ of, caption, children, inWords }: FigureProps) {
   const t = useStore(lessonPartMessages);
   const under = <figcaption className="mt-2 max-w-[36rem] text-[0.95rem] leading-snug">{caption}</figcaption>;
   return (
@@ -39,6 +47,12 @@ export function Figure({ of, caption, children }: { of?: Drawing; caption: strin
         <figure>
           {children}
           {under}
+          {inWords !== undefined && (
+            <details className="no-print mt-1 text-sm text-ink-soft">
+              <summary className="inline-flex min-h-6 items-center underline underline-offset-4">{t.describe}</summary>
+              <p className="mt-1 max-w-prose">{inWords}</p>
+            </details>
+          )}
         </figure>
       )}
     </div>
@@ -84,7 +98,7 @@ export function Steps({ children }: { children: ReactNode }) {
 export function TryIt({ title, children }: { title: string; children: ReactNode }) {
   const heading = useId();
   return (
-    <Sheet aria-labelledby={heading} className="my-7 font-sans in-[figure]:my-0 in-[figure]:border-0 in-[figure]:p-0">
+    <Sheet aria-labelledby={heading} className="my-7 font-sans in-[figure]:my-0 in-[figure]:border-0 in-[figure]:p-0!">
       <h2 id={heading} className="mb-3 font-sans text-base tracking-normal">
         {title}
       </h2>
