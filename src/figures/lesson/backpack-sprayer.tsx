@@ -1,61 +1,67 @@
-import { DrawingFrame } from '../frame.tsx';
+import { NumberedParts, type NumberedPart } from './numbered-parts.tsx';
 
-const parts = [
-  { number: 1, name: 'Tank, with the graduations you fill to', x: 150, y: 130 },
-  { number: 2, name: 'Lid and filler opening with its basket strainer', x: 150, y: 34 },
-  { number: 3, name: 'Pump handle, worked while you walk', x: 42, y: 228 },
-  { number: 4, name: 'Pump and pressure chamber', x: 112, y: 216 },
-  { number: 5, name: 'Hose', x: 232, y: 236 },
-  { number: 6, name: 'Shut-off valve with trigger and handle', x: 246, y: 166 },
-  { number: 7, name: 'Pressure gauge or regulator at the valve', x: 262, y: 126 },
-  { number: 8, name: 'Wand', x: 296, y: 96 },
-  { number: 9, name: 'Nozzle body: strainer, tip and cap', x: 330, y: 46 },
-] as const;
+const parts: readonly NumberedPart[] = [
+  { name: 'Lid, with a small hole that lets air in', at: [116, 26], on: [156, 38] },
+  { name: 'Filler strainer, a basket in the neck', at: [228, 46], on: [190, 74] },
+  { name: 'Tank with its marks', at: [246, 92], on: [214, 104] },
+  { name: 'Straps and back pad', at: [56, 92], on: [97, 112] },
+  { name: 'Pump lever', at: [26, 164], on: [38, 190] },
+  { name: 'Pump, with the pressure chamber in the tank', at: [56, 138], on: [164, 158] },
+  { name: 'Hose', at: [214, 246], on: [234, 224] },
+  { name: 'Shut-off valve; its handle holds a strainer', at: [312, 214], on: [276, 196] },
+  { name: 'Pressure regulator, on some a gauge', at: [318, 164], on: [292, 166] },
+  { name: 'Wand', at: [276, 108], on: [309, 120] },
+  { name: 'Nozzle: strainer, tip and cap', at: [300, 34], on: [332, 68] },
+];
 
-/** A backpack sprayer from the side with numbered parts; the names stand in a list beside. */
+/** A lever-pumped backpack sprayer, cut open, from the side: the wearer stands at the left. */
 export function BackpackSprayer() {
-  const alt = `A backpack sprayer from the side. ${parts.map((part) => `${part.number}: ${part.name}.`).join(' ')}`;
   return (
-    <div className="grid gap-4 sm:grid-cols-[1fr_15rem]">
-      <DrawingFrame height={272} alt={alt}>
-        <path
-          d="M102 62q0 -14 14 -14h70q16 0 16 16v120q0 16 -16 16h-70q-14 0 -14 -14z"
-          className="fill-sheet stroke-ink"
-          strokeWidth="2"
-        />
-        <path d="M103 118q48 8 98 0v66q0 15 -15 15h-70q-13 0 -13 -13z" className="fill-dye" opacity=".35" />
-        {[84, 100, 116, 132, 148, 164, 180].map((y) => (
-          <path key={y} d={`M202 ${y}h-12`} className="stroke-ink" strokeWidth="1.4" />
-        ))}
-        <rect x="126" y="34" width="50" height="14" rx="3" className="fill-rule-strong stroke-ink" strokeWidth="1.5" />
-        <path d="M102 76q-26 10 -26 60q0 34 20 54" className="stroke-ink" strokeWidth="7" fill="none" opacity=".45" />
-        <path d="M122 200h48v26h-48z" className="fill-rule stroke-ink" strokeWidth="1.6" />
-        <path d="M122 214H60q-22 0 -24 22" className="stroke-ink" strokeWidth="5" fill="none" strokeLinecap="round" />
-        <path d="M170 214q60 34 62 10q0 -20 8 -44" className="stroke-ink" strokeWidth="4.5" fill="none" />
-        <path d="M234 182l18 -34l12 6l-16 32z" className="fill-rule-strong stroke-ink" strokeWidth="1.5" />
-        <path d="M250 174q14 -2 10 -14" className="stroke-ink" strokeWidth="3" fill="none" />
-        <circle cx="262" cy="140" r="9" className="fill-sheet stroke-ink" strokeWidth="1.8" />
-        <path d="M262 140l4 -5" className="stroke-clay" strokeWidth="2" />
-        <path d="M260 150L326 58" className="stroke-ink" strokeWidth="4" />
-        <path d="M320 54l10 -4l6 8l-8 6z" className="fill-rule-strong stroke-ink" strokeWidth="1.5" />
-        <path d="M334 54l14 16M336 52l12 4" className="stroke-dye" strokeWidth="1.6" />
-        <path d="M20 256H336" className="stroke-turf" strokeWidth="2" />
-        {parts.map(({ number, x, y }) => (
-          <g key={number}>
-            <circle cx={x} cy={y} r="10.5" className="fill-ink" />
-            <text x={x} y={y + 4.5} textAnchor="middle" fontSize="13" fontWeight="700" className="fill-sheet">
-              {number}
-            </text>
-          </g>
-        ))}
-      </DrawingFrame>
-      <ol className="list-decimal pl-6 text-sm">
-        {parts.map(({ number, name }) => (
-          <li key={number} className="mb-1">
-            {name}
-          </li>
-        ))}
-      </ol>
-    </div>
+    <NumberedParts title="Backpack sprayer" height={262} parts={parts}>
+      <path
+        d="M119 78C92 84 90 150 118 176"
+        className="stroke-rule-strong"
+        strokeWidth="8"
+        fill="none"
+        strokeLinecap="round"
+      />
+      <path d="M119 128H219V190q0 16 -18 16H137q-18 0 -18 -18z" className="fill-dye" opacity=".3" />
+      <path
+        d="M136 58h66q18 0 18 20v110q0 20 -20 20h-62q-20 0 -20 -22V78q0 -20 18 -20z"
+        className="fill-none stroke-ink"
+        strokeWidth="2.2"
+      />
+      <path d="M112 86v84" className="stroke-rule-strong" strokeWidth="6" strokeLinecap="round" />
+      <path d="M152 48h44v10h-44z" className="fill-sheet stroke-ink" strokeWidth="1.6" />
+      <path d="M146 32h56v16h-56z" className="fill-rule stroke-ink" strokeWidth="1.8" strokeLinejoin="round" />
+      <path
+        d="M157 58v26q0 6 6 6h22q6 0 6 -6V58M165 60v28M174 60v28M183 60v28M158 69h32M158 79h32"
+        className="stroke-ink"
+        strokeWidth="1"
+        fill="none"
+      />
+      {[88, 104, 120, 136, 152, 168, 184].map((y) => (
+        <path key={y} d={`M220 ${y}h-12`} className="stroke-ink" strokeWidth="1.4" />
+      ))}
+      <path d="M158 140q0 -12 13 -12t13 12v68h-26z" className="fill-sheet stroke-ink" strokeWidth="1.8" />
+      <path d="M126 208h88v18h-88z" className="fill-rule stroke-ink" strokeWidth="1.6" />
+      <path d="M171 208v9H118" className="stroke-ink" strokeWidth="3" fill="none" />
+      <path
+        d="M118 217H74q-16 0 -24 -14L36 186"
+        className="stroke-ink"
+        strokeWidth="5"
+        fill="none"
+        strokeLinecap="round"
+      />
+      <path d="M44 196L33 182" className="stroke-ink" strokeWidth="10" strokeLinecap="round" />
+      <path d="M214 218q14 8 28 4q16 -6 22 -20" className="stroke-ink" strokeWidth="5" fill="none" />
+      <path d="M261 206l20 -32l9 5l-19 33z" className="fill-rule stroke-ink" strokeWidth="1.6" strokeLinejoin="round" />
+      <path d="M266 194q-6 -12 6 -26" className="stroke-ink" strokeWidth="3" fill="none" strokeLinecap="round" />
+      <path d="M283 172l6 -14l11 5l-7 14z" className="fill-sheet stroke-ink" strokeWidth="1.8" strokeLinejoin="round" />
+      <path d="M295 160L325 86q4 -12 10 -18" className="stroke-ink" strokeWidth="4.5" fill="none" />
+      <path d="M329 70l9 -9l8 8l-9 9z" className="fill-rule stroke-ink" strokeWidth="1.6" />
+      <path d="M342 58l4 -18M344 62l5 -8" className="stroke-dye" strokeWidth="1.6" />
+      <path d="M20 228H340" className="stroke-turf" strokeWidth="2.5" />
+    </NumberedParts>
   );
 }
