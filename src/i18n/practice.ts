@@ -1,4 +1,4 @@
-import { params } from '@nanostores/i18n';
+import { count, params } from '@nanostores/i18n';
 import { i18n } from './i18n.ts';
 
 export const practiceMessages = i18n('practice', {
@@ -21,6 +21,7 @@ export const practiceMessages = i18n('practice', {
   firstCounts: 'First answers count for your level; tries after it are practice.',
   answer: params('Answer: {answer}'),
   answerFirst: params('Answer part ({part}) first. Going on to a part closes the ones before it.'),
+  earlier: count({ one: 'Your earlier answer', other: 'Your {count} earlier answers' }),
   hint: params('Hint {number} of 3'),
   hintShown: params('Hint {number}'),
   giveUp: 'Show the worked solution',

@@ -1,11 +1,11 @@
 import type { LabelView } from '../../shared/contracts/label.ts';
 
-/** A practice label: a black-ruled panel that says it is not real. */
+/** A practice label: a black-ruled panel that says it is not real. In a narrow column its headings run in, as on a container. */
 export function LabelPanel({ label }: { label: LabelView }) {
   return (
     <section
       aria-label={`${label.name}. ${label.notice}`}
-      className="border-2 border-ink bg-sheet text-sm leading-snug"
+      className="@container border-2 border-ink bg-sheet text-sm leading-snug"
     >
       <p className="bg-ink px-3 py-1 text-xs font-bold tracking-wide text-sheet">{label.notice}</p>
       <header className="flex flex-wrap items-baseline justify-between gap-x-3 border-b-2 border-ink px-3 py-2">
@@ -15,11 +15,11 @@ export function LabelPanel({ label }: { label: LabelView }) {
           <span className="block text-xs text-ink-soft">{label.number}</span>
         </p>
       </header>
-      <dl className="grid grid-cols-[minmax(0,6.75rem)_1fr] gap-x-3 gap-y-1 px-3 pt-2 pb-3">
+      <dl className="grid gap-x-3 gap-y-1 px-3 pt-2 pb-3 @min-[18rem]:grid-cols-[minmax(0,6.75rem)_1fr]">
         {label.rows.map(({ heading, text }) => (
-          <div key={`${heading}${text}`} className="contents">
-            <dt className="font-bold">{heading}</dt>
-            <dd>{text}</dd>
+          <div key={`${heading}${text}`} className="@min-[18rem]:contents">
+            <dt className="inline font-bold after:content-[':_'] @min-[18rem]:after:content-none">{heading}</dt>
+            <dd className="inline">{text}</dd>
           </div>
         ))}
       </dl>

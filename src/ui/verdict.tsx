@@ -15,8 +15,15 @@ function lookOf(verdict: AttemptView['verdict']): keyof typeof looks {
   return 'slip';
 }
 
+interface VerdictPanelProps {
+  attempt: AttemptView;
+  /** Whether to say how the entry was read. */
+  withReading?: boolean;
+  ref?: Ref<HTMLDivElement>;
+}
+
 /** What grading says of one answer: a word, a shape and a color; then the mistake by name, with these numbers. */
-export function VerdictPanel({ attempt, ref }: { attempt: AttemptView; ref?: Ref<HTMLDivElement> }) {
+export function VerdictPanel({ attempt, withReading = true, ref }: VerdictPanelProps) {
   const t = useStore(verdictMessages);
   const kind = lookOf(attempt.verdict);
   const look = looks[kind];
@@ -44,7 +51,7 @@ export function VerdictPanel({ attempt, ref }: { attempt: AttemptView; ref?: Ref
       </p>
       {attempt.headline !== `${word}.` && <p className="font-bold">{attempt.headline}</p>}
       {attempt.detail !== '' && <p>{attempt.detail}</p>}
-      {attempt.read !== '' && attempt.verdict !== 'right' && (
+      {withReading && attempt.read !== '' && (
         <p className="mt-1 text-sm text-ink-soft">{t.readAs({ read: attempt.read })}</p>
       )}
     </div>

@@ -45,7 +45,7 @@ export function NumberField(props: NumberFieldProps) {
             aria-label={t.yourAnswer({ part })}
             aria-invalid={error !== null}
             aria-describedby={error === null ? undefined : `${id}-error`}
-            className="w-32 bg-transparent px-3 py-2 text-lg font-semibold outline-none"
+            className="w-24 bg-transparent wide:w-32 px-3 py-2 text-lg font-semibold outline-none"
             inputMode="decimal"
             autoComplete="off"
             autoCorrect="off"

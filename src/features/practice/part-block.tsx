@@ -5,7 +5,7 @@ import { practiceMessages } from '../../i18n/practice.ts';
 import { ApiError } from '../../lib/api.ts';
 import { Button } from '../../ui/button.tsx';
 import { useFailureText } from '../../ui/failure.tsx';
-import { VerdictPanel } from '../../ui/verdict.tsx';
+import { Attempts } from './attempts.tsx';
 import { ChoiceField } from './choice-field.tsx';
 import { useDraft } from './draft.ts';
 import { NumberField } from './number-field.tsx';
@@ -52,15 +52,8 @@ export function PartBlock({ problemId, part, lettered, after }: PartBlockProps) 
   const failureText = useFailureText();
   const seconds = useSeconds();
   const answer = useAnswer(problemId, setWaiting);
-  const verdict = useRef<HTMLDivElement>(null);
   const attempts = part.attempts.length;
-  const shown = useRef(attempts);
   const closed = part.state === 'closed';
-
-  useEffect(() => {
-    if (attempts > shown.current) verdict.current?.focus();
-    shown.current = attempts;
-  }, [attempts]);
 
   const check = (event: FormEvent) => {
     event.preventDefault();
@@ -139,13 +132,7 @@ export function PartBlock({ problemId, part, lettered, after }: PartBlockProps) 
         </>
       )}
       {waiting && <output className="block mt-2 text-sm text-brass">{t.notSaved}</output>}
-      <div aria-live="polite">
-        {part.attempts.map((attempt, index) => (
-          // Attempts are only ever added: their place is who they are.
-          // oxlint-disable-next-line react/no-array-index-key
-          <VerdictPanel key={index} attempt={attempt} ref={index === attempts - 1 ? verdict : undefined} />
-        ))}
-      </div>
+      <Attempts part={part} />
       {attempts === 1 && !closed && <p className="mt-1.5 text-sm text-ink-soft">{t.firstCounts}</p>}
       {closed && part.answerText !== null && part.attempts.at(-1)?.verdict !== 'right' && (
         <p className="mt-2">{t.answer({ answer: part.answerText })}</p>

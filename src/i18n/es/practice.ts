@@ -18,6 +18,7 @@ export const es = {
   firstCounts: 'La primera respuesta cuenta para su nivel; los intentos siguientes son práctica.',
   answer: 'Respuesta: {answer}',
   answerFirst: 'Responda primero la parte ({part}). Al pasar a una parte se cierran las anteriores.',
+  earlier: { one: 'Su respuesta anterior', other: 'Sus {count} respuestas anteriores' },
   hint: 'Pista {number} de 3',
   hintShown: 'Pista {number}',
   giveUp: 'Mostrar la solución',

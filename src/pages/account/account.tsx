@@ -18,7 +18,7 @@ import { Sheet } from '../../ui/sheet.tsx';
 
 function Section({ title, children }: { title: string; children: ReactNode }) {
   return (
-    <Sheet aria-label={title}>
+    <Sheet aria-label={title} className="mb-6 break-inside-avoid">
       <h2 className="mb-3">{title}</h2>
       {children}
     </Sheet>
