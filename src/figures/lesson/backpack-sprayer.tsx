@@ -1,17 +1,18 @@
 import { NumberedParts, type NumberedPart } from './numbered-parts.tsx';
+import { Wand } from './wand.tsx';
 
 const parts: readonly NumberedPart[] = [
   { name: 'Lid, with a small hole that lets air in', at: [116, 26], on: [156, 38] },
   { name: 'Filler strainer, a basket in the neck', at: [228, 46], on: [190, 74] },
-  { name: 'Tank with its marks', at: [246, 92], on: [214, 104] },
+  { name: 'Tank with its marks', at: [182, 110], on: [210, 104] },
   { name: 'Straps and back pad', at: [56, 92], on: [97, 112] },
   { name: 'Pump lever', at: [26, 164], on: [38, 190] },
   { name: 'Pump, with the pressure chamber in the tank', at: [56, 138], on: [164, 158] },
-  { name: 'Hose', at: [214, 246], on: [234, 224] },
-  { name: 'Shut-off valve; its handle holds a strainer', at: [312, 214], on: [276, 196] },
-  { name: 'Pressure regulator, on some a gauge', at: [318, 164], on: [292, 166] },
-  { name: 'Wand', at: [276, 108], on: [309, 120] },
-  { name: 'Nozzle: strainer, tip and cap', at: [300, 34], on: [332, 68] },
+  { name: 'Hose', at: [262, 176], on: [236, 150] },
+  { name: 'Shut-off valve; its handle holds a strainer', at: [300, 72], on: [266, 96] },
+  { name: 'Pressure regulator, on some a gauge', at: [324, 104], on: [280, 120] },
+  { name: 'Wand', at: [334, 142], on: [304, 150] },
+  { name: 'Nozzle: strainer, tip and cap', at: [284, 204], on: [323, 198] },
 ];
 
 /** A lever-pumped backpack sprayer, cut open, from the side: the wearer stands at the left. */
@@ -54,14 +55,9 @@ export function BackpackSprayer() {
         strokeLinecap="round"
       />
       <path d="M44 196L33 182" className="stroke-ink" strokeWidth="10" strokeLinecap="round" />
-      <path d="M214 218q14 8 28 4q16 -6 22 -20" className="stroke-ink" strokeWidth="5" fill="none" />
-      <path d="M261 206l20 -32l9 5l-19 33z" className="fill-rule stroke-ink" strokeWidth="1.6" strokeLinejoin="round" />
-      <path d="M266 194q-6 -12 6 -26" className="stroke-ink" strokeWidth="3" fill="none" strokeLinecap="round" />
-      <path d="M283 172l6 -14l11 5l-7 14z" className="fill-sheet stroke-ink" strokeWidth="1.8" strokeLinejoin="round" />
-      <path d="M295 160L325 86q4 -12 10 -18" className="stroke-ink" strokeWidth="4.5" fill="none" />
-      <path d="M329 70l9 -9l8 8l-9 9z" className="fill-rule stroke-ink" strokeWidth="1.6" />
-      <path d="M342 58l4 -18M344 62l5 -8" className="stroke-dye" strokeWidth="1.6" />
-      <path d="M20 228H340" className="stroke-turf" strokeWidth="2.5" />
+      <path d="M214 218C242 224 236 168 236 144S232 86 245 85" className="stroke-ink" strokeWidth="5" fill="none" />
+      <Wand x={244} y={84} regulator />
+      <path d="M16 228H348" className="stroke-turf" strokeWidth="2.5" />
     </NumberedParts>
   );
 }
