@@ -31,6 +31,7 @@ export const lessonMessages = i18n('lessons', {
   }),
   backToPlace: 'Go to where you stopped',
   print: 'Print',
+  formula: 'Formula',
   table: 'Table',
   checkpointOf: params('Checkpoint {number} of {count}'),
   another: 'Try one with new numbers',

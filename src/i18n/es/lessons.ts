@@ -28,6 +28,7 @@ export const es = {
   },
   backToPlace: 'Ir a donde se quedó',
   print: 'Imprimir',
+  formula: 'Fórmula',
   table: 'Tabla',
   checkpointOf: 'Punto de control {number} de {count}',
   another: 'Probar otro con números nuevos',

@@ -26,9 +26,22 @@ function Table(props: ComponentProps<'table'>) {
   );
 }
 
+function WideFormula(props: ComponentProps<'span'>) {
+  const { formula } = useStore(lessonMessages);
+  // It scrolls where it is wider than a phone, so it must be reachable by keyboard (WCAG 2.1.1); a paragraph holds no div.
+  // oxlint-disable-next-line jsx-a11y/no-noninteractive-tabindex, jsx-a11y/prefer-tag-over-role
+  return <span {...props} role="group" aria-label={formula} tabIndex={0} />;
+}
+
+/** Formulas come as spans; those on a line of their own may be wider than the page. */
+function Span(props: ComponentProps<'span'>) {
+  return props.className === 'katex-display' ? <WideFormula {...props} /> : <span {...props} />;
+}
+
 /** Everything a lesson's text may use besides plain Markdown. */
 export const lessonParts = {
   a: Anchor,
+  span: Span,
   table: Table,
   AtTheTank,
   Caution,
