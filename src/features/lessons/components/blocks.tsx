@@ -59,11 +59,12 @@ export function Figure({ of, caption, children, inWords }: FigureProps) {
   );
 }
 
-/** One problem worked from what is known to the answer and its check. */
-export function WorkedExample({ children }: { children: ReactNode }) {
+/** One problem worked from what is known to the answer and its check; `on` tells a second one of a lesson from the first. */
+export function WorkedExample({ on, children }: { on?: string; children: ReactNode }) {
   const t = useStore(lessonPartMessages);
+  const title = on === undefined ? t.worked : `${t.worked}: ${on}`;
   return (
-    <Box title={t.worked} look="border border-t-2 border-rule border-t-dye bg-sheet">
+    <Box title={title} look="border border-t-2 border-rule border-t-dye bg-sheet">
       {children}
     </Box>
   );
