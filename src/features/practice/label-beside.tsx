@@ -19,7 +19,7 @@ export function LabelOnPhone({ label, floating }: { label: LabelView; floating: 
       </details>
       {floating && (
         <div className="fixed right-3 bottom-[4.75rem] z-10">
-          <Button look="quiet" className="bg-sheet shadow-md" onClick={() => sheet.current?.showModal()}>
+          <Button look="quiet" className="bg-sheet! shadow-md" onClick={() => sheet.current?.showModal()}>
             {t.showLabel}
           </Button>
         </div>

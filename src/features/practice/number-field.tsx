@@ -34,7 +34,7 @@ export function NumberField(props: NumberFieldProps) {
   };
   return (
     <div className="mt-2">
-      <div className="flex flex-wrap items-stretch gap-x-3 gap-y-2">
+      <div className="flex flex-wrap items-stretch gap-x-2 gap-y-2 wide:gap-x-3">
         <div
           className={`inline-flex overflow-hidden rounded-[3px] border-[1.5px] bg-sheet focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-dye ${error ? 'border-clay' : 'border-ink'}`}
         >
@@ -45,7 +45,7 @@ export function NumberField(props: NumberFieldProps) {
             aria-label={t.yourAnswer({ part })}
             aria-invalid={error !== null}
             aria-describedby={error === null ? undefined : `${id}-error`}
-            className="w-24 bg-transparent wide:w-32 px-3 py-2 text-lg font-semibold outline-none"
+            className="w-24 bg-transparent px-2.5 wide:w-32 wide:px-3 py-2 text-lg font-semibold outline-none"
             inputMode="decimal"
             autoComplete="off"
             autoCorrect="off"
@@ -58,7 +58,7 @@ export function NumberField(props: NumberFieldProps) {
           {units.length > 1 && (
             <select
               aria-label={t.unit({ part })}
-              className="border-l-[1.5px] border-ink bg-tank px-2 py-2 outline-none focus-visible:bg-dye-wash"
+              className="border-l-[1.5px] border-ink bg-tank px-1 py-2 outline-none focus-visible:bg-dye-wash wide:px-2"
               value={unit}
               disabled={disabled}
               onChange={(event) => onUnit(event.target.value)}

@@ -1,4 +1,6 @@
 import { queryOptions, useMutation, useQueryClient, type QueryClient } from '@tanstack/react-query';
+import { useRef } from 'react';
+import { v4 as uuid } from 'uuid';
 import type {
   AnswerReply,
   DrillView,
@@ -9,7 +11,7 @@ import type {
   Response,
 } from '../../../shared/contracts/practice.ts';
 import type { PartKey } from '../../../shared/vocabulary.ts';
-import { api } from '../../lib/api.ts';
+import { api, ApiError } from '../../lib/api.ts';
 import { withRetries } from './with-retries.ts';
 
 export const problemQuery = (id: string) =>
@@ -47,16 +49,27 @@ export interface SentAnswer {
   seconds: number;
 }
 
-/** Sends one answer. The key is made once a press, so that sending it again records it once. */
+/**
+ * Sends one answer. Its key is made once a press, so that sending it again records it once; pressing again after no reply
+ * came sends the same entry under the same key, since the first may have arrived.
+ */
 export function useAnswer(problemId: string, onWaiting: (waiting: boolean) => void) {
   const client = useQueryClient();
+  const unanswered = useRef<{ key: string; entry: string } | null>(null);
   return useMutation({
     mutationFn: ({ part, response, seconds }: SentAnswer) => {
-      const key = crypto.randomUUID();
+      const entry = JSON.stringify([part, response]);
+      const key = unanswered.current?.entry === entry ? unanswered.current.key : uuid();
+      unanswered.current = { key, entry };
       const path = `/api/problems/${problemId}/parts/${part}/answers`;
       return withRetries(() => api<AnswerReply>('POST', path, { key, response, seconds }), onWaiting);
     },
+    onError: (error) => {
+      const hasArrived = error instanceof ApiError && error.status >= 400 && error.status < 500;
+      if (hasArrived) unanswered.current = null;
+    },
     onSuccess: async (reply) => {
+      unanswered.current = null;
       if (reply.unreadable) return;
       const { queryKey } = problemQuery(problemId);
       const { parts, state } = reply;

@@ -39,7 +39,7 @@ export default function Account() {
           <SignOut onDone={leave} />
         </div>
       </PageHeading>
-      <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-6 wide:grid-cols-2">
+      <div className="gap-6 wide:columns-2">
         <Section title={t.you}>
           <AboutYou me={me} />
           <div className="mt-5 border-t border-rule pt-4">
