@@ -24,16 +24,15 @@ export function LessonEnd({ lesson, done }: { lesson: LessonSummary; done: numbe
     return () => watch.disconnect();
   }, []);
   // Asked again at every checkpoint that is done: the server knows which are missing.
-  // oxlint-disable-next-line react/exhaustive-effect-dependencies
   useEffect(() => {
     if (seen && !isRead) mutate({ position: 1, state: 'read' });
+    // oxlint-disable-next-line react/exhaustive-effect-dependencies
   }, [seen, done, isRead, mutate]);
   return (
     <div ref={end} className="mt-8 border-t-2 border-ink pt-4">
       <output className="block">
         {isRead ? (
           <>
-            {' '}
             <Chip tone="mark">{t.read}</Chip> {t.isRead}
           </>
         ) : (
