@@ -46,7 +46,7 @@ export function MeasuresDrawing({ figure }: { figure: MeasuresFigure }) {
         >
           <path d={`M${-width / 2 + 8} ${floor}H${width / 2 - 8}`} className="stroke-rule-strong" />
           <Shape tool={tool} />
-          <text y="149" textAnchor="middle" fontSize="14">
+          <text y="149" textAnchor="middle">
             {name}
           </text>
         </g>

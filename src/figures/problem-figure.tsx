@@ -1,10 +1,12 @@
-import type { ReactNode } from 'react';
+import { lazy, Suspense, type ReactNode } from 'react';
 import type { Figure } from '../../shared/contracts/figure.ts';
-import { BoomDrawing } from './boom-drawing.tsx';
-import { MeasuresDrawing } from './measures-drawing.tsx';
-import { NozzleDrawing } from './nozzle-drawing.tsx';
 import { PlanDrawing } from './plan-drawing.tsx';
-import { TankDrawing } from './tank-drawing.tsx';
+
+// Plans stand in most lessons and problems; the other drawings are fetched with the problems that have them.
+const BoomDrawing = lazy(async () => ({ default: (await import('./boom-drawing.tsx')).BoomDrawing }));
+const MeasuresDrawing = lazy(async () => ({ default: (await import('./measures-drawing.tsx')).MeasuresDrawing }));
+const NozzleDrawing = lazy(async () => ({ default: (await import('./nozzle-drawing.tsx')).NozzleDrawing }));
+const TankDrawing = lazy(async () => ({ default: (await import('./tank-drawing.tsx')).TankDrawing }));
 
 function Drawing({ figure }: { figure: Figure }) {
   switch (figure.kind) {
@@ -26,7 +28,9 @@ export function ProblemFigure(props: { figure: Figure; describe: string; caption
   const { figure, describe, caption } = props;
   return (
     <figure className="my-4">
-      <Drawing figure={figure} />
+      <Suspense fallback={<div aria-hidden="true" className="h-48" />}>
+        <Drawing figure={figure} />
+      </Suspense>
       {caption}
       <details className="no-print mt-1 text-sm text-ink-soft">
         <summary className="inline-flex min-h-6 items-center underline underline-offset-4">{describe}</summary>

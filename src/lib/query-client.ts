@@ -19,5 +19,8 @@ function onError(error: unknown): void {
 export const queryClient: QueryClient = new QueryClient({
   queryCache: new QueryCache({ onError }),
   mutationCache: new MutationCache({ onError }),
-  defaultOptions: { queries: { retry: worthRetrying, staleTime: 15_000 }, mutations: { retry: false } },
+  defaultOptions: {
+    queries: { retry: worthRetrying, staleTime: 15_000, networkMode: 'always' },
+    mutations: { retry: false, networkMode: 'always' },
+  },
 });

@@ -74,7 +74,7 @@ export default async function product(project: TestProject): Promise<() => Promi
   };
   const tsx = ['--import', 'tsx'];
   await finished(program([...tsx, 'scripts/migrate.ts'], env, 'ignore'), 'the migration');
-  await finished(program([...tsx, 'scripts/seed.ts', '--people-only'], env, 'ignore'), 'the seed');
+  await finished(program([...tsx, 'scripts/seed.ts'], env, 'ignore'), 'the seed');
   const server = program(['dist/server/main.js'], env, 'ignore');
   await ready(url);
   project.provide('productUrl', url);
