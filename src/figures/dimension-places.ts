@@ -69,7 +69,7 @@ export function placeDimensions(dimensions: readonly PlanDimension<string>[], la
       const box = plateBox(point, dimension.text);
       return onPaper(box, layout.height) && !taken.some((other) => meet(box, other, 1));
     });
-    const at = free ?? tried[0];
+    const at = free ?? tried[0] ?? placed.from;
     taken.push(plateBox(at, dimension.text));
     return { ...placed, at };
   });

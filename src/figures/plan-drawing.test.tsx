@@ -1,6 +1,6 @@
 import { render, screen } from '@testing-library/react';
 import { describe, expect, test } from 'vitest';
-import type { Figure, PlanFigure } from '../../shared/contracts/figure.ts';
+import type { PlanFigure } from '../../shared/contracts/figure.ts';
 import { drawingWidth } from './frame.tsx';
 import { meet, placeDimensions, plateBox } from './dimension-places.ts';
 import { namePlaces } from './name-places.ts';
