@@ -3,8 +3,8 @@ import { DrawingFrame } from './frame.tsx';
 
 const top = 34;
 const bottom = 190;
-const left = 120;
-const right = 300;
+const left = 80;
+const right = 260;
 
 /** A tank from the side with its graduations; the liquid stands at `level`. */
 export function TankDrawing({ figure }: { figure: TankFigure }) {

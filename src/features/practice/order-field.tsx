@@ -60,9 +60,9 @@ export function OrderField(props: {
           <li
             key={step.key}
             data-step={step.key}
-            className="mb-1.5 flex items-center gap-3 border-[1.5px] border-rule-strong bg-sheet py-1.5 pr-1.5 pl-3"
+            className="mb-1.5 flex items-center gap-2.5 border-[1.5px] border-rule-strong bg-sheet py-1.5 pr-1.5 pl-2"
           >
-            <span className="w-5 flex-none text-right font-bold text-ink-soft tabular-nums">{index + 1}</span>
+            <span className="w-4 flex-none text-right font-bold text-ink-soft tabular-nums">{index + 1}</span>
             <span className="mr-auto">{step.text}</span>
             {!disabled && (
               <span className="flex flex-none gap-1">
