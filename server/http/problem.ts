@@ -33,7 +33,11 @@ export const problemByCode: Readonly<Record<FailureCode, Mapping>> = {
   },
   'key-reused': { status: 409, title: 'Key used before', detail: 'This key was used for another answer.' },
   'part-closed': { status: 409, title: 'Part closed', detail: 'This part is closed. Its answer is shown.' },
-  'out-of-turn': { status: 409, title: 'Out of turn', detail: 'Parts are answered and hints are shown one after the other.' },
+  'out-of-turn': {
+    status: 409,
+    title: 'Out of turn',
+    detail: 'Parts are answered and hints are shown one after the other.',
+  },
   'drill-done': { status: 409, title: 'Drill done', detail: 'This drill has no more problems.' },
   'nothing-to-drill': { status: 422, title: 'Nothing to drill', detail: 'There are no problems for this choice yet.' },
   busy: { status: 503, title: 'Busy', detail: 'Too much at once. Try again.' },

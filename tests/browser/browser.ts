@@ -8,7 +8,7 @@ import { generate, type Problem } from '../../server/problems/engine.ts';
 import { familyVersion } from '../../server/problems/registry.ts';
 import { eq } from 'drizzle-orm';
 import { demoPassword } from '../../scripts/demo/people.ts';
-import type {} from '../support/product.ts';
+import '../support/product.ts';
 
 const axeSource = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
 const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];

@@ -1,7 +1,7 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, expect, test } from 'vitest';
+import { afterAll, beforeAll, expect, inject, test } from 'vitest';
 import { families } from '../../server/problems/registry.ts';
 import { labels } from '../../server/problems/labels/labels.ts';
 import { projectRoot } from '../../server/project-root.ts';
@@ -21,6 +21,7 @@ test('a visitor is sent to sign in and comes back to the page asked for', async 
   await page.locator('input[type=password]').fill('mark-the-tank');
   await page.keyboard.press('Enter');
   await page.waitForURL('**/progress');
+  expect(new URL(page.url()).pathname).toBe('/progress');
   await close();
 });
 
@@ -31,6 +32,7 @@ test('nobody is led to another site after signing in', async () => {
   await page.locator('input[type=password]').fill('mark-the-tank');
   await page.keyboard.press('Enter');
   await page.waitForURL('**/today');
+  expect(new URL(page.url()).origin).toBe(inject('productUrl'));
   await close();
 });
 
@@ -38,7 +40,9 @@ test("a trainee is told that the authors' pages are not theirs", async () => {
   const { page, close } = await newPage(browser, { screen: wide });
   await signIn(page, 'imre.tollund@example.test');
   await page.goto('/staff/families');
-  await page.getByRole('heading', { name: 'This page is not for your account' }).waitFor();
+  const heading = page.getByRole('heading', { level: 1 });
+  await heading.waitFor();
+  expect(await heading.textContent()).toBe('This page is not for your account');
   await close();
 });
 
