@@ -68,6 +68,8 @@ export function buildApp(deps: AppDeps): BuiltApp {
 
   const app = express();
   app.disable('x-powered-by');
+  // Replies of the API are never stored, so a hash of each is work for nothing; static files keep theirs.
+  app.disable('etag');
   app.set('trust proxy', env.TRUST_PROXY);
   app.set('query parser', 'simple');
   app.use(identify(), requestLog(log), securityHeaders(appUrl));
