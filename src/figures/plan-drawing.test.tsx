@@ -65,4 +65,18 @@ describe('a plan', () => {
     render(<PlanDrawing figure={lawn} />);
     for (const { text } of lawn.dimensions) expect(screen.getByText(text)).toBeInTheDocument();
   });
+  test('an arrow’s text keeps clear of a dimension’s, even in a strip as thin as a course', () => {
+    const course: PlanFigure = {
+      kind: 'plan',
+      width: 200,
+      height: 17,
+      shapes: [{ form: 'rect', x: 0, y: 0, width: 200, height: 17, ground: 'turf' }],
+      dimensions: [{ from: [0, 0], to: [200, 0], text: '200 ft', place: 'outside', side: 'left' }],
+      arrows: [{ from: [12, 6], to: [188, 6], text: '39 s' }],
+      alt: 'A course of 200 feet, covered in 39 seconds.',
+    };
+    render(<PlanDrawing figure={course} />);
+    const yOf = (text: string) => Number(screen.getByText(text).getAttribute('y'));
+    expect(Math.abs(yOf('39 s') - yOf('200 ft'))).toBeGreaterThanOrEqual(20);
+  });
 });

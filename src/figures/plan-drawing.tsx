@@ -2,7 +2,7 @@ import type { PlanArrow, PlanDimension, PlanFigure, PlanShape, Point } from '../
 import { DrawingFrame, drawingWidth, textWidth } from './frame.tsx';
 import { groundFill, isHatched, useHatching } from './grounds.tsx';
 import { namePlaces } from './name-places.ts';
-import { placeDimensions, plateBox, type PlacedDimension } from './dimension-places.ts';
+import { meet, placeDimensions, plateBox, type Box, type PlacedDimension } from './dimension-places.ts';
 import { planLayout, type PlanLayout } from './plan-layout.ts';
 
 /** Text on a plate of the paper's own color, kept inside the drawing. */
@@ -59,7 +59,16 @@ function Dimension({ dimension, placed }: { dimension: PlanDimension<string>; pl
   );
 }
 
-function Arrow({ arrow, layout }: { arrow: PlanArrow<string>; layout: PlanLayout }) {
+/** Where an arrow's text stands: beside it, or on it where a dimension's text is in the way. */
+function arrowTextAt(arrow: PlanArrow<string>, layout: PlanLayout, taken: readonly Box[]): Point {
+  const from = layout.at(arrow.from);
+  const to = layout.at(arrow.to);
+  const middle: Point = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
+  const tries = [-14, 0, 14].map((by): Point => [middle[0], middle[1] + by]);
+  return tries.find((at) => !taken.some((box) => meet(plateBox(at, arrow.text ?? ''), box, 1))) ?? middle;
+}
+
+function Arrow({ arrow, layout, textAt }: { arrow: PlanArrow<string>; layout: PlanLayout; textAt: Point }) {
   const from = layout.at(arrow.from);
   const to = layout.at(arrow.to);
   const angle = (Math.atan2(to[1] - from[1], to[0] - from[0]) * 180) / Math.PI;
@@ -67,7 +76,7 @@ function Arrow({ arrow, layout }: { arrow: PlanArrow<string>; layout: PlanLayout
     <g>
       <path d={`M${from.join(' ')}L${to.join(' ')}`} className="stroke-dye" strokeWidth="2" fill="none" />
       <path d="M-11 -6L0 0L-11 6z" className="fill-dye" transform={`translate(${to.join(' ')}) rotate(${angle})`} />
-      {arrow.text !== undefined && <Plate at={[(from[0] + to[0]) / 2, (from[1] + to[1]) / 2 - 14]} text={arrow.text} />}
+      {arrow.text !== undefined && <Plate at={textAt} text={arrow.text} />}
     </g>
   );
 }
@@ -98,7 +107,7 @@ export function PlanDrawing({ figure }: { figure: PlanFigure }) {
         return at && name !== undefined ? <Plate key={`${name} ${at.join(' ')}`} at={at} text={name} bold /> : null;
       })}
       {figure.arrows?.map((arrow) => (
-        <Arrow key={JSON.stringify(arrow)} arrow={arrow} layout={layout} />
+        <Arrow key={JSON.stringify(arrow)} arrow={arrow} layout={layout} textAt={arrowTextAt(arrow, layout, texts)} />
       ))}
       {figure.dimensions.map((dimension, index) => (
         <Dimension key={JSON.stringify(dimension)} dimension={dimension} placed={placed[index] as PlacedDimension} />

@@ -1,3 +1,4 @@
+import { useId } from 'react';
 import type { TankFigure } from '../../shared/contracts/figure.ts';
 import { DrawingFrame } from './frame.tsx';
 
@@ -8,6 +9,7 @@ const right = 260;
 
 /** A tank from the side with its graduations; the liquid stands at `level`. */
 export function TankDrawing({ figure }: { figure: TankFigure }) {
+  const clip = useId();
   const level = Math.min(Math.max(figure.level, 0), 1);
   const y = bottom - (bottom - top) * level;
   return (
@@ -23,11 +25,17 @@ export function TankDrawing({ figure }: { figure: TankFigure }) {
         strokeWidth="1.8"
       />
       {level > 0 && (
-        <path
-          d={`M${left + 1} ${y}q${(right - left) / 2} 7 ${right - left - 2} 0V${bottom - 9}a9 9 0 0 1 -9 9H${left + 10}a9 9 0 0 1 -9 -9z`}
-          className="fill-dye"
-          opacity=".75"
-        />
+        <>
+          <clipPath id={clip}>
+            <rect x={left + 1} y={top + 1} width={right - left - 2} height={bottom - top - 2} rx="9" />
+          </clipPath>
+          <path
+            d={`M${left} ${y}q${(right - left) / 2} 7 ${right - left} 0V${bottom}H${left}z`}
+            clipPath={`url(#${clip})`}
+            className="fill-dye"
+            opacity=".75"
+          />
+        </>
       )}
       {Array.from({ length: 9 }, (_, index) => {
         const mark = bottom - ((bottom - top) * (index + 1)) / 10;
