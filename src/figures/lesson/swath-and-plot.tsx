@@ -70,7 +70,7 @@ export function SwathAndPlot() {
           onChange={setSwathFt}
         />
         <output className="block">
-          340 sq ft ÷ {swathFt} ft = <b>{lengthFt} ft</b> long
+          340 sq ft ÷ {swathFt} ft {lengthFt * swathFt === plotSqFt ? '=' : '≈'} <b>{lengthFt} ft</b> long
         </output>
       </div>
       <Strip swathFt={swathFt} lengthFt={lengthFt} />
