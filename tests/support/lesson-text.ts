@@ -6,7 +6,7 @@ export function proseOf(mdx: string): string[] {
   return mdx
     .replace(/^---\n[\s\S]*?\n---\n/, '')
     .replaceAll(/^import .*$/gm, '')
-    .replaceAll(/^export const [\s\S]*?^}(?: as const)?;$/gm, '')
+    .replaceAll(/^export const [\s\S]*?;$/gm, '')
     .replaceAll(/\{\/\*[\s\S]*?\*\/\}/g, '')
     .replaceAll(/^\$\$\n[\s\S]*?\n\$\$$/gm, '')
     .replaceAll(/(?<!\\)\$[^$\n]+\$/g, 'sum')
