@@ -1,16 +1,19 @@
 import { useStore } from '@nanostores/react';
-import { useEffect, useRef, useState, type FormEvent } from 'react';
+import { lazy, Suspense, useEffect, useRef, useState, type FormEvent } from 'react';
 import type { PartView, Response } from '../../../shared/contracts/practice.ts';
 import { practiceMessages } from '../../i18n/practice.ts';
 import { ApiError } from '../../lib/api.ts';
 import { Button } from '../../ui/button.tsx';
 import { useFailureText } from '../../ui/failure.tsx';
+import { Loading } from '../../ui/loading.tsx';
 import { Attempts } from './attempts.tsx';
 import { ChoiceField } from './choice-field.tsx';
 import { useDraft } from './draft.ts';
 import { NumberField } from './number-field.tsx';
-import { OrderField } from './order-field.tsx';
 import { useAnswer } from './queries.ts';
+
+// Few problems ask for an order: its field is fetched with them.
+const OrderField = lazy(async () => ({ default: (await import('./order-field.tsx')).OrderField }));
 
 /** Seconds since the part came in front of the person, or since the last answer to it. */
 function useSeconds(): () => number {
@@ -114,12 +117,14 @@ export function PartBlock({ problemId, part, lettered, after }: PartBlockProps) 
         />
       )}
       {part.kind === 'order' && (
-        <OrderField
-          part={part}
-          keys={closed ? [] : value.split(' ')}
-          onChange={(keys) => change(keys.join(' '))}
-          disabled={answer.isPending || closed}
-        />
+        <Suspense fallback={<Loading />}>
+          <OrderField
+            part={part}
+            keys={closed ? [] : value.split(' ')}
+            onChange={(keys) => change(keys.join(' '))}
+            disabled={answer.isPending || closed}
+          />
+        </Suspense>
       )}
       {(part.kind === 'choice' || part.kind === 'order') && (
         <>

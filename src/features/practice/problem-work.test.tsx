@@ -147,7 +147,7 @@ test('steps are put in order by keyboard alone, and each move is told', async ()
   const { sent, user } = open(buildProblemView({ parts: [buildOrderPart()] }), () =>
     reply({ parts: [buildOrderPart({ attempts: [buildAttempt({ verdict: 'unrecognised', slip: null })] })] }),
   );
-  screen.getByRole('button', { name: 'Move down: Add the product' }).focus();
+  (await screen.findByRole('button', { name: 'Move down: Add the product' })).focus();
   await user.keyboard('{Enter}');
   expect(screen.getByText('Add the product is now step 2 of 3.')).toBeInTheDocument();
   await waitFor(() => expect(screen.getByRole('button', { name: 'Move down: Add the product' })).toHaveFocus());
