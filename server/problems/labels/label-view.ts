@@ -84,7 +84,7 @@ function limitText({ applications, daysApart }: PracticeLabel['limit'], locale: 
 
 function windText({ mostMph, waterBufferFt }: PracticeLabel['wind'], locale: Locale): string {
   return locale === 'es'
-    ? `No aplique con viento de más de ${mostMph} mph. Manténgase a ${waterBufferFt} ft o más de estanques, arroyos y desagües.`
+    ? `No aplique con viento de más de ${mostMph} mi/h. Manténgase a ${waterBufferFt} pies o más de estanques, arroyos y desagües.`
     : `Do not apply in wind over ${mostMph} mph. Stay ${waterBufferFt} ft or more from ponds, streams and drains.`;
 }
 
