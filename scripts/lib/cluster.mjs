@@ -216,7 +216,7 @@ async function ensureDatabase({ url }) {
 /** Stops and removes test clusters whose run was killed before it could. Their names end in the run's process id. */
 export async function removeStaleTestClusters() {
   for (const name of readdirSync(dataPath())) {
-    const pid = /^test-(\d+)$/.exec(name)?.[1];
+    const pid = /^test-(\d+)(-\w+)?$/.exec(name)?.[1];
     if (!pid || existsSync(`/proc/${pid}`)) continue;
     await removeCluster(name);
   }

@@ -50,7 +50,7 @@ async function ready(url: string): Promise<void> {
 /** Starts the built product with its demonstration people on a database of its own. Needs `npm run build` before. */
 export default async function product(project: TestProject): Promise<() => Promise<void>> {
   await removeStaleTestClusters();
-  const name = `test-${process.pid}`;
+  const name = `test-${process.pid}-browser`;
   const cluster = await startCluster({ name, fast: true });
   const folder = await mkdtemp(join(tmpdir(), 'tankmark-product-'));
   const mailbox = program(['dist/server/mailbox.js', join(folder, 'mailbox')], process.env, 'pipe');
