@@ -79,6 +79,8 @@ export function featureRoutes({ env, database, auth, tries, now, contentFolder }
   const mailbox = hasMailbox && env.MAILBOX_URL !== undefined ? mailboxService(env.MAILBOX_URL) : null;
 
   return [
+    // Routes are tried in this order: what is asked for most comes first.
+    ...practiceRoutes(practice, progress),
     ...accountRoutes({
       account,
       mailbox: hasMailbox,
@@ -89,7 +91,6 @@ export function featureRoutes({ env, database, auth, tries, now, contentFolder }
     ...mailboxRoutes(mailbox),
     ...sampleRoutes(sampleService()),
     ...drillRoutes(drillService(drillRepo(db), practice)),
-    ...practiceRoutes(practice, progress),
     ...progressRoutes(progress),
     ...familyRoutes(familyService()),
   ];

@@ -88,8 +88,13 @@ async function admit(
 
 function send(response: Response, result: unknown, status: number | undefined): void {
   response.setHeader('Cache-Control', 'no-store');
-  if (result === undefined) response.status(status ?? 204).end();
-  else response.status(status ?? 200).json(result);
+  response.statusCode = status ?? (result === undefined ? 204 : 200);
+  if (result === undefined) {
+    response.end();
+    return;
+  }
+  response.setHeader('Content-Type', 'application/json; charset=utf-8');
+  response.end(JSON.stringify(result));
 }
 
 /**

@@ -1,8 +1,19 @@
-import type { RequestHandler } from 'express';
+import { ServerResponse } from 'node:http';
+import type { Request, RequestHandler } from 'express';
 import helmet from 'helmet';
 
 /** Pages whose address carries a token: nothing of it may leave by the Referer header. */
 const pagesWithToken = new Set(['/confirm', '/reset']);
+
+/** The headers that a handler sets, taken down from a reply that goes nowhere. */
+function headersSetBy(set: ReturnType<typeof helmet>, request: Request): Map<string, string> {
+  const reply = new ServerResponse(request);
+  set(request, reply, (error?: unknown) => {
+    if (error) throw error;
+  });
+  reply.setHeader('Permissions-Policy', 'camera=(), geolocation=(), microphone=(), payment=(), usb=()');
+  return new Map(Object.entries(reply.getHeaders()).map(([name, value]) => [name, String(value)]));
+}
 
 /**
  * Security headers with a strict content policy: everything from here, no inline script, no foreign host. Style attributes
@@ -36,11 +47,12 @@ export function securityHeaders(appUrl: string): RequestHandler {
     xFrameOptions: { action: 'deny' },
     crossOriginEmbedderPolicy: false,
   });
+  let headers: Map<string, string> | null = null;
   return (request, response, next) => {
-    set(request, response, (error?: unknown) => {
-      if (pagesWithToken.has(request.path)) response.setHeader('Referrer-Policy', 'no-referrer');
-      response.setHeader('Permissions-Policy', 'camera=(), geolocation=(), microphone=(), payment=(), usb=()');
-      next(error);
-    });
+    // They are the same for every reply: made once, by the first.
+    headers ??= headersSetBy(set, request);
+    response.setHeaders(headers);
+    if (pagesWithToken.has(request.path)) response.setHeader('Referrer-Policy', 'no-referrer');
+    next();
   };
 }

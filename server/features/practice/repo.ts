@@ -5,7 +5,7 @@ import { AppError } from '../../../shared/errors.ts';
 import type { Context, Tier, Topic } from '../../../shared/vocabulary.ts';
 import { problem } from '../../db/schema/practice.ts';
 import type { LoggedAnswer } from './replay.ts';
-import { loadSql, recordSql } from './statements.ts';
+import { loadSql, recordForm } from './statements.ts';
 
 export type ProblemRow = typeof problem.$inferSelect;
 export type NewProblem = typeof problem.$inferInsert;
@@ -74,7 +74,7 @@ export interface RecordWrite {
   at: Date;
 }
 
-/** The values of `recordSql`, in the order of its placeholders. */
+/** The values of the recording statement, in the order of its placeholders. */
 function recordValues(write: RecordWrite): unknown[] {
   const { userId, sequence, ability, problem: own, at, answers, topics, slips, day, closed } = write;
   const values: unknown[] = [userId, sequence, ability.mean, ability.variance];
@@ -108,11 +108,9 @@ export function practiceRepo(db: NodePgDatabase, pool: Pool) {
      */
     async record(write: RecordWrite): Promise<boolean> {
       try {
-        const { rows } = await pool.query<{ recorded: number }>({
-          name: 'practice-record',
-          text: recordSql,
-          values: recordValues(write),
-        });
+        const slips = write.slips.length > 0;
+        const { name, text } = recordForm({ slips, closes: write.closed });
+        const { rows } = await pool.query<{ recorded: number }>({ name, text, values: recordValues(write) });
         return (rows[0]?.recorded ?? 0) > 0;
       } catch (error) {
         if (error instanceof Error && 'constraint' in error && error.constraint === 'answer_once') {

@@ -22,12 +22,7 @@ left join drill d on d.user_id = p.user_id and d.id = p.drill_id
 left join ability ab on ab.user_id = p.user_id
 where p.user_id = $1 and p.id = $2`;
 
-/**
- * $1 user, $2 expected sequence, $3 $4 ability, $5 problem, $6 family, $7 version, $8 tier, $9 context, $10 moment,
- * $11 answers, $12 topics, $13 slips, $14 day, $15 answered, $16 right, $17 seconds, $18 whether the problem closes.
- * Every branch draws from `own`, which is empty when another answer of the person was recorded since the read.
- */
-export const recordSql = `
+const answersAndLevels = `
 with own as (
   update ability set mean = $3::float8, variance = $4::float8, sequence = sequence + 1
   where user_id = $1::uuid and sequence = $2::int returning user_id
@@ -45,21 +40,58 @@ with own as (
     days int, last_day date, reached_at timestamptz)
   on conflict (user_id, topic) do update set mean = excluded.mean, variance = excluded.variance,
     answers = excluded.answers, "right" = excluded."right", days = excluded.days, last_day = excluded.last_day,
-    last_at = excluded.last_at, reached_at = excluded.reached_at
+    last_at = excluded.last_at, reached_at = excluded.reached_at`;
+
+const slipCounts = `
 ), slips as (
   insert into slip_count (user_id, topic, family, slip, times, last_at)
   select own.user_id, r.topic, r.family, r.slip, count(*)::int, $10::timestamptz
   from own, jsonb_to_recordset($13::jsonb) as r(topic text, family text, slip text)
   group by own.user_id, r.topic, r.family, r.slip
   on conflict (user_id, family, slip, topic) do update set times = slip_count.times + excluded.times,
-    last_at = excluded.last_at
+    last_at = excluded.last_at`;
+
+const dayCounts = `
 ), days as (
   insert into day_count (user_id, day, answered, "right", seconds)
   select own.user_id, $14::date, $15::int, $16::int, $17::int from own where $15::int > 0 or $17::int > 0
   on conflict (user_id, day) do update set answered = day_count.answered + excluded.answered,
-    "right" = day_count."right" + excluded."right", seconds = day_count.seconds + excluded.seconds
+    "right" = day_count."right" + excluded."right", seconds = day_count.seconds + excluded.seconds`;
+
+const closing = `
 ), closing as (
   update problem set closed_at = $10::timestamptz
-  from own where problem.user_id = own.user_id and problem.id = $5::uuid and $18::boolean and problem.closed_at is null
+  from own where problem.user_id = own.user_id and problem.id = $5::uuid and $18::boolean and problem.closed_at is null`;
+
+/**
+ * $1 user, $2 expected sequence, $3 $4 ability, $5 problem, $6 family, $7 version, $8 tier, $9 context, $10 moment,
+ * $11 answers, $12 topics, $13 slips, $14 day, $15 answered, $16 right, $17 seconds, $18 whether the problem closes.
+ * Every branch draws from `own`, which is empty when another answer of the person was recorded since the read.
+ * Most answers make no slip and many close no problem: what is not needed is left out, its value only taken note of.
+ */
+function recordSql(needs: { slips: boolean; closes: boolean }): string {
+  const parts = [answersAndLevels, needs.slips ? slipCounts : '', dayCounts, needs.closes ? closing : ''];
+  return `${parts.join('')}
 )
-select count(*)::int as recorded from own`;
+select count(*)::int as recorded from own where $13::jsonb is not null and $18::boolean is not null`;
+}
+
+type Needs = Parameters<typeof recordSql>[0];
+
+function form(needs: Needs): { name: string; text: string } {
+  return {
+    name: `practice-record${needs.slips ? '-slips' : ''}${needs.closes ? '-closes' : ''}`,
+    text: recordSql(needs),
+  };
+}
+
+const plain = form({ slips: false, closes: false });
+const closes = form({ slips: false, closes: true });
+const slips = form({ slips: true, closes: false });
+const both = form({ slips: true, closes: true });
+
+/** The statement that records what is needed, with the name it is prepared under; each form is made once. */
+export function recordForm(needs: Needs): { name: string; text: string } {
+  if (needs.slips) return needs.closes ? both : slips;
+  return needs.closes ? closes : plain;
+}
