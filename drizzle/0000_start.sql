@@ -187,7 +187,6 @@ ALTER TABLE "user_role" ADD CONSTRAINT "user_role_user_id_user_id_fk" FOREIGN KE
 CREATE INDEX "account_user" ON "account" USING btree ("user_id");--> statement-breakpoint
 CREATE INDEX "session_user" ON "session" USING btree ("user_id");--> statement-breakpoint
 CREATE INDEX "verification_identifier" ON "verification" USING btree ("identifier");--> statement-breakpoint
-CREATE INDEX "answer_by_time" ON "answer" USING btree ("user_id","id");--> statement-breakpoint
 CREATE INDEX "drill_recent" ON "drill" USING btree ("user_id","created_at" DESC NULLS LAST);--> statement-breakpoint
 CREATE UNIQUE INDEX "problem_place" ON "problem" USING btree ("user_id","drill_id","position") WHERE "problem"."drill_id" is not null;--> statement-breakpoint
 CREATE INDEX "problem_checkpoint" ON "problem" USING btree ("user_id","lesson","checkpoint","shown_at") WHERE "problem"."lesson" is not null;

@@ -31,6 +31,8 @@ export interface AppDeps {
   now?: () => Date;
   /** The built client; dist/client unless given. */
   clientFolder?: string;
+  /** Adds routes of the caller's own before ours, such as the benchmark's bare one. */
+  mount?: (app: Express) => void;
   /** Where lessons are read from; content unless given. */
   contentFolder?: string;
 }
@@ -76,6 +78,7 @@ export function buildApp(deps: AppDeps): BuiltApp {
   mountHealth(app, { pool, log, isStopping: () => stopping });
   app.use('/api', express.json({ limit: '64kb' }));
   app.all('/api/auth/*splat', authHandler({ auth, sessions, tries, appUrl, origins, dropUnconfirmed }));
+  deps.mount?.(app);
   mountRoutes(app, routes, { sessions, entitlement, origins });
   app.use('/api', () => {
     throw new AppError('not-found');

@@ -2,15 +2,14 @@ import { randomUUID } from 'node:crypto';
 import { createServer } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import { Writable } from 'node:stream';
-import express from 'express';
+import express, { type Request, type Response } from 'express';
 import { buildApp } from '../../server/app.ts';
 import { openDatabase } from '../../server/db/client.ts';
 import { migrateDatabase } from '../../server/db/migrate.ts';
 import { readEnv } from '../../server/env.ts';
 import { createLog } from '../../server/http/log.ts';
 
-// The product and, beside it in the same process, a bare Express route that does one INSERT through pg: what the
-// benchmark of a graded answer is held against.
+// The product with a bare route beside its own, in the same Express: one INSERT through pg and nothing else.
 
 const env = readEnv();
 const database = openDatabase({ url: env.DATABASE_URL, connections: env.DATABASE_POOL, onIdleError: () => undefined });
@@ -23,21 +22,24 @@ await database.pool.query(
 const nowhere = new Writable({ write: (_chunk, _encoding, done) => done() });
 const log = createLog({ level: 'info', stream: nowhere });
 const mail = { send: () => Promise.resolve(), close: () => undefined };
-const { app } = buildApp({ env, database, mail, log });
-
-const bare = express();
-bare.disable('x-powered-by');
-bare.post('/bare', express.json(), async (request, response) => {
+async function insertOne(request: Request, response: Response): Promise<void> {
   await database.pool.query({
     name: 'bench-bare',
     text: 'insert into bench_bare (id, body, at) values ($1, $2, now())',
     values: [randomUUID(), JSON.stringify(request.body)],
   });
   response.json({ ok: true });
-});
-bare.use(app);
+}
 
-const server = createServer(bare);
+// In the product's own Express: what the bar speaks of.
+const { app } = buildApp({ env, database, mail, log, mount: (own) => void own.post('/api/bare', insertOne) });
+
+// And in an Express with nothing else in it, for comparison.
+const empty = express();
+empty.post('/empty', express.json(), insertOne);
+empty.use(app);
+
+const server = createServer(empty);
 server.listen(env.PORT, '127.0.0.1', () => {
   process.stdout.write(`${JSON.stringify({ port: (server.address() as AddressInfo).port })}\n`);
 });

@@ -113,9 +113,12 @@ export async function benchAnswer(options: {
       const cookie = await signIn(port, email);
       lanes.push(requests.map((request) => ({ ...request, cookie })));
     }
-    const bareLane = Array.from({ length: bareARound }, () => ({ path: '/bare', body: '{"typed":"2.4 fl oz"}' }));
-    const bareLanes = lanes.map(() => bareLane);
+    const bareLanes = (path: string) => {
+      const lane = Array.from({ length: bareARound }, () => ({ path, body: '{"typed":"2.4 fl oz"}' }));
+      return lanes.map(() => lane);
+    };
     const ratios: number[] = [];
+    const ratiosToEmpty: number[] = [];
     const answers: number[] = [];
     for (let round = 0; round <= rounds; round += 1) {
       const own = lanes.map((lane) => lane.slice(round * answersARound, (round + 1) * answersARound));
@@ -124,7 +127,8 @@ export async function benchAnswer(options: {
         port,
         own.map((lane) => lane.map(looking)),
       );
-      const bare = await throughput(port, bareLanes);
+      const bare = await throughput(port, bareLanes('/api/bare'));
+      const empty = await throughput(port, bareLanes('/empty'));
       const answered = await throughput(port, own);
       if (verbose)
         console.log(
@@ -134,11 +138,25 @@ export async function benchAnswer(options: {
       if (round === 0) await database.pool.query('analyze');
       else {
         ratios.push(answered / bare);
+        ratiosToEmpty.push(answered / empty);
         answers.push(answered);
       }
     }
     return [
-      { name: 'answer', figure: median(ratios), unit: 'of a bare INSERT route', bar: leastRatio, atLeast: true },
+      {
+        name: 'answer',
+        figure: median(ratios),
+        unit: 'of a bare INSERT route in the same Express',
+        bar: leastRatio,
+        atLeast: true,
+      },
+      {
+        name: 'answer-to-empty-express',
+        figure: median(ratiosToEmpty),
+        unit: 'of the same route in an empty Express (no bar)',
+        bar: 0,
+        atLeast: true,
+      },
       { name: 'answer-throughput', figure: median(answers), unit: 'answers/s (no bar)', bar: 0, atLeast: true },
     ];
   } finally {

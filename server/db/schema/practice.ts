@@ -107,8 +107,6 @@ export const answer = pgTable(
   (table) => [
     primaryKey({ columns: [table.userId, table.problemId, table.part, table.attempt] }),
     unique('answer_once').on(table.userId, table.key),
-    // Identifiers are time-ordered: this is also the order of time.
-    index('answer_by_time').on(table.userId, table.id),
   ],
 );
 
