@@ -12,6 +12,7 @@ import { claim } from './lib/runner.mjs';
 // npm start: all the set-up, then the product, until it is told to stop.
 
 const readySeconds = 20;
+const portPatienceTenths = 40;
 
 async function waitUntilReady(port, child) {
   const deadline = Date.now() + readySeconds * 1000;
@@ -25,13 +26,23 @@ async function waitUntilReady(port, child) {
   throw new Plain('The server did not become ready; its messages stand above.');
 }
 
+/** What a killed earlier run has left stops within a moment: its port is waited for. */
+async function freeSoon(port) {
+  for (let tenth = 0; tenth < portPatienceTenths; tenth += 1) {
+    if (await isFree(port)) return true;
+    await pause(100);
+  }
+  return false;
+}
+
 await lifetime(async ({ onEnd, end }) => {
   const port = Number(process.env.PORT || 4180);
   if (!Number.isInteger(port) || port < 1 || port > 65_535)
     throw new Plain(`PORT must be a port number, got "${process.env.PORT}".`);
   onEnd(claim('start'));
-  if (!(await isFree(port)))
+  if (!(await freeSoon(port))) {
     throw new Plain(`Port ${port} is in use. Stop what uses it, or choose another: PORT=4190 npm start`);
+  }
   await installPackages();
   const db = await database({
     onExit: () => {
@@ -54,7 +65,7 @@ await lifetime(async ({ onEnd, end }) => {
   const server = spawn(process.execPath, [join(root, 'dist/server/main.js')], {
     cwd: root,
     env,
-    stdio: ['ignore', 'inherit', 'inherit'],
+    stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
     detached: true,
   });
   server.on('exit', (code) => {

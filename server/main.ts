@@ -72,6 +72,8 @@ async function stop(signal: string): Promise<void> {
 }
 process.on('SIGTERM', () => void stop('SIGTERM'));
 process.on('SIGINT', () => void stop('SIGINT'));
+// Started by a script that was killed: nobody is left to stop us.
+process.on('disconnect', () => void stop('disconnect'));
 process.on('uncaughtException', (error) => {
   log.fatal({ err: error }, 'a fault nobody caught');
   process.exitCode = 1;
