@@ -1,6 +1,6 @@
 import { randomBytes } from 'node:crypto';
 import { AppError } from '../../../shared/errors.ts';
-import type { Tier } from '../../../shared/vocabulary.ts';
+import type { Tier, Topic } from '../../../shared/vocabulary.ts';
 import { generate, type Problem } from '../../problems/engine.ts';
 import { familyVersion } from '../../problems/registry.ts';
 
@@ -15,6 +15,7 @@ export function randomSeed(): string {
 /** Generates problems from what is stored of them, keeping the recent ones. */
 export function problemCache() {
   const kept = new Map<string, Problem>();
+  const topics = new Map<string, readonly Topic[]>();
   return {
     /** @throws AppError `not-found` when the family is no longer known in that version */
     get(key: { family: string; version: number; seed: string; tier: Tier }): Problem {
@@ -28,5 +29,15 @@ export function problemCache() {
       if (kept.size > mostKept) kept.delete(kept.keys().next().value as string);
       return made;
     },
+
+    /** Notes which topics a shown problem exercises: reading for its answer then needs those levels only. */
+    remember(id: string, { parts }: Problem): void {
+      if (topics.has(id)) return;
+      topics.set(id, [...new Set(parts.map((part) => part.topic))]);
+      if (topics.size > mostKept) topics.delete(topics.keys().next().value as string);
+    },
+
+    /** The topics of a problem shown not long ago; null when it is not remembered. */
+    topicsOf: (id: string): readonly Topic[] | null => topics.get(id) ?? null,
   };
 }

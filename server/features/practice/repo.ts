@@ -87,8 +87,13 @@ function recordValues(write: RecordWrite): unknown[] {
 /** Reads and writes of problems put before people and of the answer log. */
 export function practiceRepo(db: NodePgDatabase, pool: Pool) {
   return {
-    async load(userId: string, problemId: string): Promise<Loaded | null> {
-      const { rows } = await pool.query<Loaded>({ name: 'practice-load', text: loadSql, values: [userId, problemId] });
+    /** `topics` are those the problem exercises, where the caller knows them already; null reads all levels. */
+    async load(userId: string, problemId: string, topics: readonly Topic[] | null): Promise<Loaded | null> {
+      const { rows } = await pool.query<Loaded>({
+        name: 'practice-load',
+        text: loadSql,
+        values: [userId, problemId, topics],
+      });
       const found = rows[0];
       // Identifiers are time-ordered. Sorting a handful here keeps the statement on the index by problem.
       found?.answers.sort((a, b) => (a.id < b.id ? -1 : 1));

@@ -109,9 +109,10 @@ export function practiceService({ repo, zone, now, newId = () => uuidv7() }: Pra
     worker: Worker,
     problemId: string,
   ): Promise<{ loaded: Loaded; problem: Problem; standing: Standing }> {
-    const loaded = await repo.load(worker.id, problemId);
+    const loaded = await repo.load(worker.id, problemId, problems.topicsOf(problemId));
     if (!loaded) throw new AppError('not-found');
     const problem = problems.get(loaded.problem);
+    problems.remember(problemId, problem);
     return { loaded, problem, standing: replay(problem, loaded.answers, worker.language) };
   }
 

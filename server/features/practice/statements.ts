@@ -1,7 +1,7 @@
 // The two statements of the hot path, prepared by name: reading all that grading needs, and recording an answer with
 // everything that follows from it as one atomic statement.
 
-/** $1 user, $2 problem. One row or none; the owner stands in the WHERE. Answers come in no order: the caller sorts. */
+/** $1 user, $2 problem, $3 the topics whose levels are wanted, null for all. One row or none; the owner stands in the WHERE. Answers come in no order: the caller sorts. */
 export const loadSql = `
 select json_build_object(
     'id', p.id, 'family', p.family, 'version', p.version, 'seed', p.seed, 'tier', p.tier, 'context', p.context,
@@ -16,7 +16,7 @@ select json_build_object(
   coalesce((
     select json_agg(json_build_object('topic', t.topic, 'mean', t.mean, 'variance', t.variance, 'answers', t.answers,
       'right', t."right", 'days', t.days, 'lastDay', t.last_day, 'lastAt', t.last_at, 'reachedAt', t.reached_at))
-    from topic_level t where t.user_id = p.user_id), '[]'::json) as topics
+    from topic_level t where t.user_id = p.user_id and ($3::text[] is null or t.topic = any($3::text[]))), '[]'::json) as topics
 from problem p
 left join drill d on d.user_id = p.user_id and d.id = p.drill_id
 left join ability ab on ab.user_id = p.user_id
