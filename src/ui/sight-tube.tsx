@@ -19,12 +19,18 @@ export const levelTones: Record<LevelView['state'], ChipTone> = {
 };
 
 /** A topic's level as liquid in a sight tube, with the red line at the mark and a faint band for its likely range. */
-export function SightTube({ level }: { level: Pick<LevelView, 'state' | 'fill' | 'range'> }) {
+export function SightTube({
+  level,
+  className = '',
+}: {
+  level: Pick<LevelView, 'state' | 'fill' | 'range'>;
+  className?: string;
+}) {
   const clip = useId();
   const yOf = (share: number) => top + height * (1 - share);
   const y = level.fill === null ? null : yOf(level.fill);
   return (
-    <svg width="44" height="96" viewBox="0 0 44 96" aria-hidden="true" className="flex-none">
+    <svg width="44" height="96" viewBox="0 0 44 96" aria-hidden="true" className={`flex-none ${className}`}>
       <clipPath id={clip}>
         <rect x="7" y="3" width="18" height="90" rx="8" />
       </clipPath>

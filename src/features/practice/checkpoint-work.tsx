@@ -1,5 +1,5 @@
 import { useStore } from '@nanostores/react';
-import { useQuery, useQueryClient } from '@tanstack/react-query';
+import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { useEffect } from 'react';
 import type { ProblemView } from '../../../shared/contracts/practice.ts';
 import type { Tier } from '../../../shared/vocabulary.ts';
@@ -37,25 +37,30 @@ export function CheckpointWork({ lesson, checkpoint, family, tier, onDone }: Che
     staleTime: Infinity,
   });
   const problem = useQuery({ ...problemQuery(first.data ?? ''), enabled: first.data !== undefined }).data;
+  const another = useMutation({
+    mutationFn: () => draw(true),
+    onSuccess: (fresh) => {
+      client.setQueryData(problemQuery(fresh.id).queryKey, fresh);
+      client.setQueryData(key, fresh.id);
+    },
+  });
   const isDone = problem?.state === 'done';
   useEffect(() => {
     if (isDone) onDone(checkpoint);
   }, [isDone, checkpoint, onDone]);
   if (first.error) return <Failure error={first.error} />;
   if (first.data === undefined) return <Loading />;
-  const another = async () => {
-    const fresh = await draw(true);
-    client.setQueryData(problemQuery(fresh.id).queryKey, fresh);
-    client.setQueryData(key, fresh.id);
-  };
   return (
     <ProblemWork
       problemId={first.data}
       compact
       after={
-        <Button look="plain" onClick={() => void another()}>
-          {t.another}
-        </Button>
+        <>
+          <Failure error={another.error} />
+          <Button look="plain" disabled={another.isPending} onClick={() => another.mutate()}>
+            {t.another}
+          </Button>
+        </>
       }
     />
   );

@@ -2,6 +2,7 @@ import { useStore } from '@nanostores/react';
 import type { DrillView } from '../../../shared/contracts/practice.ts';
 import { drillMessages } from '../../i18n/drills.ts';
 import { Button, ButtonLink } from '../../ui/button.tsx';
+import { Failure } from '../../ui/failure.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
 import { useNewDrill } from './queries.ts';
 
@@ -30,6 +31,7 @@ export function DrillEnd({
       <p className="mt-2 mb-4 font-serif text-lg">
         {t.doneText({ right, length: drill.length })} {partly > 0 && t.partly(partly)}
       </p>
+      <Failure error={make.error} />
       <div className="flex flex-wrap gap-3">
         <Button onClick={again} disabled={make.isPending}>
           {t.again}

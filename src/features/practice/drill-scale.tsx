@@ -14,6 +14,9 @@ const looks: Record<Place['outcome'], string> = {
 };
 const signs: Record<Place['outcome'], string> = { right: '✓', partly: '◐', wrong: '✕', open: '▾', waiting: '' };
 
+/** At most ten marks a row on a phone: more would be too narrow to read and to press. */
+const columns: Record<number, string> = { 5: 'grid-cols-5', 10: 'grid-cols-10', 20: 'grid-cols-10 wide:grid-cols-20' };
+
 function useOutcome(): (place: Place) => string {
   const t = useStore(drillMessages);
   const words = {
@@ -39,7 +42,9 @@ export function DrillScale({
   const t = useStore(drillMessages);
   const outcome = useOutcome();
   return (
-    <ol className="mb-4 flex max-w-[44rem] overflow-hidden rounded-md border border-ink">
+    <ol
+      className={`mb-4 grid max-w-[44rem] gap-px overflow-hidden rounded-md border border-ink bg-rule-strong ${columns[drill.length] ?? 'grid-cols-10'}`}
+    >
       {drill.places.map((place) => {
         const name = `${t.progressLabel({ position: place.position, length: drill.length })}: ${outcome(place)}`;
         const here = place.problemId !== null && place.problemId === shownId;
@@ -54,7 +59,7 @@ export function DrillScale({
           </>
         );
         return (
-          <li key={place.position} className="flex flex-1 border-l border-rule-strong first:border-l-0">
+          <li key={place.position} className="flex">
             {place.problemId === null ? (
               <span className={look}>{inside}</span>
             ) : (

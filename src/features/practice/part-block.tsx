@@ -1,6 +1,6 @@
 import { useStore } from '@nanostores/react';
 import { lazy, Suspense, useEffect, useRef, useState, type FormEvent } from 'react';
-import type { PartView, Response } from '../../../shared/contracts/practice.ts';
+import type { LevelView, PartView, Response } from '../../../shared/contracts/practice.ts';
 import { practiceMessages } from '../../i18n/practice.ts';
 import { ApiError } from '../../lib/api.ts';
 import { Button } from '../../ui/button.tsx';
@@ -9,6 +9,7 @@ import { Loading } from '../../ui/loading.tsx';
 import { Attempts } from './attempts.tsx';
 import { ChoiceField } from './choice-field.tsx';
 import { useDraft } from './draft.ts';
+import { LevelLine } from './level-line.tsx';
 import { NumberField } from './number-field.tsx';
 import { useAnswer } from './queries.ts';
 
@@ -51,6 +52,7 @@ export function PartBlock({ problemId, part, lettered, after }: PartBlockProps) 
   const [value, keep, forget] = useDraft(`${problemId}.${part.key}`, '');
   const [unit, keepUnit] = useDraft(`${problemId}.${part.key}.unit`, units[0]?.key ?? '');
   const [waiting, setWaiting] = useState(false);
+  const [level, setLevel] = useState<LevelView | null>(null);
   const [refused, setRefused] = useState<string | null>(null);
   const failureText = useFailureText();
   const seconds = useSeconds();
@@ -72,6 +74,7 @@ export function PartBlock({ problemId, part, lettered, after }: PartBlockProps) 
         onSuccess: (reply) => {
           if (reply.unreadable) setRefused(reply.unreadable.message);
           else if (reply.parts.find((one) => one.key === part.key)?.state === 'closed') forget();
+          if (reply.level) setLevel(reply.level);
         },
         onError: (error) =>
           setRefused(error instanceof ApiError && error.status !== 0 ? failureText(error) : t.couldNotSave),
@@ -138,6 +141,7 @@ export function PartBlock({ problemId, part, lettered, after }: PartBlockProps) 
       )}
       {waiting && <output className="block mt-2 text-sm text-brass">{t.notSaved}</output>}
       <Attempts part={part} />
+      {level && <LevelLine level={level} />}
       {attempts === 1 && !closed && <p className="mt-1.5 text-sm text-ink-soft">{t.firstCounts}</p>}
       {closed && part.answerText !== null && part.attempts.at(-1)?.verdict !== 'right' && (
         <p className="mt-2">{t.answer({ answer: part.answerText })}</p>

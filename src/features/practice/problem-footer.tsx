@@ -2,6 +2,7 @@ import { useStore } from '@nanostores/react';
 import type { LevelView, ProblemView } from '../../../shared/contracts/practice.ts';
 import { practiceMessages } from '../../i18n/practice.ts';
 import { Button } from '../../ui/button.tsx';
+import { Failure } from '../../ui/failure.tsx';
 import { useAnother, useNextProblem } from './queries.ts';
 import { TopicTube } from './topic-tubes.tsx';
 
@@ -29,6 +30,7 @@ export function ProblemFooter(props: {
             <TopicTube key={level.topic} level={level} />
           ))}
       </div>
+      <Failure error={next.error ?? another.error} />
       <div className="flex flex-wrap gap-3">
         {drill && !last && (
           <Button disabled={next.isPending} onClick={() => next.mutate(undefined, { onSuccess: onShow })}>

@@ -2,7 +2,7 @@ import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { cleanup, render, screen, waitFor } from '@testing-library/react';
 import { userEvent } from '@testing-library/user-event';
 import { afterEach, expect, test, vi } from 'vitest';
-import type { AnswerReply, ProblemView } from '../../../shared/contracts/practice.ts';
+import type { AnswerReply, LevelView, ProblemView } from '../../../shared/contracts/practice.ts';
 import { answerFetch } from '../../../tests/support/answer-fetch.ts';
 import {
   buildAttempt,
@@ -34,12 +34,13 @@ function open(problem: ProblemView, answer: (sent: Sent, times: number) => Respo
   });
   const client = new QueryClient({ defaultOptions: { queries: { staleTime: Infinity } } });
   client.setQueryData(problemQuery(problem.id).queryKey, problem);
-  render(
+  const page = (id: string) => (
     <QueryClientProvider client={client}>
-      <ProblemWork problemId={problem.id} />
-    </QueryClientProvider>,
+      <ProblemWork problemId={id} />
+    </QueryClientProvider>
   );
-  return { sent, user: userEvent.setup({ delay: null }) };
+  const { rerender } = render(page(problem.id));
+  return { sent, client, show: (id: string) => rerender(page(id)), user: userEvent.setup({ delay: null }) };
 }
 
 afterEach(() => {
@@ -117,6 +118,35 @@ test('pressing again after giving up waiting keeps the key; another entry gets a
   await user.type(field(), '0{Enter}');
   await vi.advanceTimersByTimeAsync(15_000);
   expect(new Set(sent.map(({ key }) => key)).size).toBe(2);
+});
+
+test('another problem in the same place begins with an empty field', async () => {
+  const first = buildProblemView();
+  const second = buildProblemView({ id: '0197f0a0-0000-7000-8000-0000000000bb', heading: 'Another lawn' });
+  const { client, show, user } = open(first, () => null);
+  await user.type(field(), '1800');
+  client.setQueryData(problemQuery(second.id).queryKey, second);
+  show(second.id);
+  expect(field()).toHaveValue('');
+});
+
+test('an answer that counts tells where its topic now stands', async () => {
+  const range = { low: 0.4, high: 0.8 };
+  const level: LevelView = { topic: 'area', state: 'filling', answers: 3, fill: 0.6, range, tiers: [1] };
+  const { user } = open(buildProblemView(), () =>
+    reply({ parts: [buildNumberPart({ attempts: [buildAttempt()] })], level }),
+  );
+  await user.type(field(), '1800{Enter}');
+  expect(await screen.findByText('Measuring the site: filling')).toBeInTheDocument();
+});
+
+test('a hint that cannot be fetched says why', async () => {
+  const { user } = open(buildProblemView(), () => null);
+  answerFetch(() => {
+    throw new TypeError('Failed to fetch');
+  });
+  await user.click(screen.getByRole('button', { name: 'Hint 1 of 3' }));
+  expect(await screen.findByRole('alert')).toHaveTextContent(/cannot be reached/);
 });
 
 test('earlier answers are folded under the newest', () => {

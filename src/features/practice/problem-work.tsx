@@ -85,7 +85,8 @@ export function ProblemWork({
   const beside = !compact && problem.label !== null;
   return (
     <div className={beside ? 'grid items-start gap-6 wide:grid-cols-[minmax(0,1fr)_20rem]' : ''}>
-      <Worksheet problem={problem} compact={compact} after={after} />
+      {/* Another problem in the same place begins with empty fields. */}
+      <Worksheet key={problem.id} problem={problem} compact={compact} after={after} />
       {!compact && (
         <aside className={beside ? '' : 'mt-4'}>
           {problem.label && (
