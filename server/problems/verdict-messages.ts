@@ -171,8 +171,8 @@ export const wholeOnlyMessage: Message = {
 export const blankMessage: Message = {
   headline: { en: 'Left open.', es: 'Sin responder.' },
   detail: {
-    en: 'The worked solution was shown before an answer was given.',
-    es: 'Se mostró la solución antes de dar una respuesta.',
+    en: 'The worked solution was shown before a right answer was given.',
+    es: 'Se mostró la solución antes de dar una respuesta correcta.',
   },
 };
 
