@@ -13,6 +13,7 @@ export const practiceMessages = i18n('practice', {
   yourAnswer: params('Your answer to part ({part})'),
   unit: params('Unit for part ({part})'),
   keys: 'Signs that phone keypads lack',
+  space: 'Space',
   check: params('Check ({part})'),
   checkOne: 'Check',
   checking: 'Checking …',

@@ -14,7 +14,7 @@ export const progressMessages = i18n('progress', {
   blank: 'too few answers',
   range2: params('{low} to {high}'),
   days: 'Answers by day',
-  daysChart: params('Bars: first answers a day, the darker part right. {days} days, most {most} on one day.'),
+  daysChart: params('Bars: first answers a day, the filled part right. {days} days, most {most} on one day.'),
   showTable: 'Show as table',
   day: 'Day',
   answered: 'Answered',

@@ -124,7 +124,7 @@ export function Frame() {
     if (language !== undefined) chooseLocale(language);
   }, [language]);
   return (
-    <div className={me ? 'min-h-screen pb-20 wide:flex wide:pb-0' : 'min-h-screen'}>
+    <div className={me ? 'min-h-screen pb-28 wide:flex wide:pb-0' : 'min-h-screen'}>
       <a href="#content" className="sr-only focus:not-sr-only focus:absolute focus:z-30 focus:bg-sheet focus:p-3">
         {t.skip}
       </a>

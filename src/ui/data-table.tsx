@@ -6,6 +6,8 @@ export interface Column<Row> {
   head: string;
   /** Numbers stand to the right, in figures of one width. */
   number?: boolean;
+  /** Left out on phones, where another cell says it. */
+  wideOnly?: boolean;
   cell: (row: Row) => ReactNode;
 }
 
@@ -26,11 +28,11 @@ export function DataTable<Row>(props: {
         </caption>
         <thead>
           <tr>
-            {columns.map(({ key, head, number }) => (
+            {columns.map(({ key, head, number, wideOnly }) => (
               <th
                 key={key}
                 scope="col"
-                className={`border-b border-rule px-2 py-2 text-sm font-semibold text-ink-soft ${number ? 'text-right' : 'text-left'}`}
+                className={`border-b border-rule px-2 py-2 text-sm font-semibold text-ink-soft ${number ? 'text-right' : 'text-left'} ${wideOnly ? 'hidden wide:table-cell' : ''}`}
               >
                 {head}
               </th>
@@ -40,8 +42,8 @@ export function DataTable<Row>(props: {
         <tbody>
           {rows.map((row) => (
             <tr key={rowKey(row)}>
-              {columns.map(({ key, number, cell }, index) => {
-                const look = `border-b border-rule px-2 py-2 align-top ${number ? 'text-right whitespace-nowrap tabular-nums' : 'text-left'}`;
+              {columns.map(({ key, number, wideOnly, cell }, index) => {
+                const look = `border-b border-rule px-2 py-2 align-top ${number ? 'text-right whitespace-nowrap tabular-nums' : 'text-left'} ${wideOnly ? 'hidden wide:table-cell' : ''}`;
                 return index === 0 ? (
                   <th key={key} scope="row" className={`${look} font-semibold`}>
                     {cell(row)}

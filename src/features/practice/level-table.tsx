@@ -1,4 +1,5 @@
 import { useStore } from '@nanostores/react';
+import type { ReactNode } from 'react';
 import type { LevelView } from '../../../shared/contracts/practice.ts';
 import { progressMessages } from '../../i18n/progress.ts';
 import { levelMessages, topicMessages } from '../../i18n/words.ts';
@@ -12,6 +13,15 @@ function inHundred(share: number): number {
 
 function stateChip(state: LevelView['state'], word: string) {
   return <Chip tone={levelTones[state]}>{word}</Chip>;
+}
+
+/** The topic, and on phones its state under it. */
+function withState(topic: string, chip: ReactNode) {
+  return (
+    <>
+      {topic} <span className="block wide:hidden">{chip}</span>
+    </>
+  );
 }
 
 function soft(text: string) {
@@ -37,10 +47,15 @@ export function LevelTable({ levels }: { levels: readonly LevelView[] }) {
       rows={levels}
       rowKey={(level) => level.topic}
       columns={[
-        { key: 'topic', head: t.topic, cell: (level) => topics[level.topic] },
+        {
+          key: 'topic',
+          head: t.topic,
+          cell: ({ topic, state }) => withState(topics[topic], stateChip(state, states[state])),
+        },
         {
           key: 'state',
           head: t.state,
+          wideOnly: true,
           cell: ({ state }) => stateChip(state, states[state]),
         },
         {

@@ -17,7 +17,23 @@ interface NumberFieldProps {
   children: ReactNode;
 }
 
-const fractionKeys = ['/', '½', '¼', '¾'];
+const fractionKeys = ['/', '½', '¼', '¾', ' '];
+
+function SpaceSign() {
+  return (
+    <svg
+      width="20"
+      height="18"
+      viewBox="0 0 20 18"
+      aria-hidden="true"
+      fill="none"
+      stroke="currentColor"
+      strokeWidth="2"
+    >
+      <path d="M3 9v5h14V9" />
+    </svg>
+  );
+}
 
 /** One number with its unit. Phones show the decimal keypad; the signs it lacks stand beside. */
 export function NumberField(props: NumberFieldProps) {
@@ -28,7 +44,7 @@ export function NumberField(props: NumberFieldProps) {
   const insert = (sign: string) => {
     const at = input.current?.selectionStart ?? value.length;
     const before = value.slice(0, at);
-    const space = sign !== '/' && /\d$/.test(before) ? ' ' : '';
+    const space = sign !== '/' && sign !== ' ' && /\d$/.test(before) ? ' ' : '';
     onChange(`${before}${space}${sign}${value.slice(at)}`);
     input.current?.focus();
   };
@@ -45,7 +61,7 @@ export function NumberField(props: NumberFieldProps) {
             aria-label={t.yourAnswer({ part })}
             aria-invalid={error !== null}
             aria-describedby={error === null ? undefined : `${id}-error`}
-            className="w-24 bg-transparent px-2.5 wide:w-32 wide:px-3 py-2 text-lg font-semibold outline-none"
+            className="w-20 bg-transparent px-2.5 wide:w-32 wide:px-3 py-2 text-lg font-semibold outline-none"
             inputMode="decimal"
             autoComplete="off"
             autoCorrect="off"
@@ -83,10 +99,11 @@ export function NumberField(props: NumberFieldProps) {
             key={sign}
             type="button"
             disabled={disabled}
+            aria-label={sign === ' ' ? t.space : undefined}
             onClick={() => insert(sign)}
-            className="min-h-11 min-w-11 rounded-[3px] border border-rule-strong bg-tank text-lg"
+            className="grid min-h-11 min-w-11 place-items-center rounded-[3px] border border-rule-strong bg-tank text-lg"
           >
-            {sign}
+            {sign === ' ' ? <SpaceSign /> : sign}
           </button>
         ))}
       </fieldset>

@@ -86,7 +86,7 @@ export function PartBlock({ problemId, part, lettered, after }: PartBlockProps) 
     setRefused(null);
   };
   const button = closed ? null : (
-    <Button type="submit" disabled={answer.isPending}>
+    <Button type="submit" className="max-wide:px-3" disabled={answer.isPending}>
       {answer.isPending ? t.checking : lettered ? t.check({ part: part.key }) : t.checkOne}
     </Button>
   );

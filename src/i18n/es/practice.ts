@@ -10,6 +10,7 @@ export const es = {
   yourAnswer: 'Su respuesta a la parte ({part})',
   unit: 'Unidad de la parte ({part})',
   keys: 'Signos que faltan en el teclado del teléfono',
+  space: 'Espacio',
   check: 'Revisar ({part})',
   checkOne: 'Revisar',
   checking: 'Revisando …',

@@ -11,7 +11,7 @@ export const es = {
   blank: 'pocas respuestas',
   range2: '{low} a {high}',
   days: 'Respuestas por día',
-  daysChart: 'Barras: primeras respuestas por día, lo oscuro bien. {days} días, máximo {most} en un día.',
+  daysChart: 'Barras: primeras respuestas por día, lo lleno, correctas. {days} días, máximo {most} en un día.',
   showTable: 'Ver como tabla',
   day: 'Día',
   answered: 'Respondidas',
