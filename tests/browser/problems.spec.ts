@@ -3,7 +3,7 @@ import { afterAll, beforeAll, expect, test } from 'vitest';
 import { roundedAnswer } from '../../server/problems/answer-text.ts';
 import { partsGivenEarlier } from '../../server/problems/engine.ts';
 import { isNumeric } from '../../server/problems/tolerance.ts';
-import { closeDatabase, newPage, openBrowser, openDrill, secretOf, signIn, wide } from './browser.ts';
+import { closeDatabase, newPage, openBrowser, openDrill, phone, secretOf, signIn, wide } from './browser.ts';
 
 let browser: Browser;
 beforeAll(async () => {
@@ -61,6 +61,25 @@ test('credit is carried; an unreadable entry stays in the field; a reload loses 
     .getByText(/earns its mark/i)
     .first()
     .waitFor();
+  await close();
+});
+
+test('on a phone the label is one press away while answering, opens at its top, and leads back', async () => {
+  const { page, close } = await newPage(browser, { screen: phone });
+  await signIn(page, trainee);
+  await openDrill(page, 'rate', 1);
+  for (let tries = 0; (await page.getByText('Practice label:').count()) === 0 && tries < 8; tries += 1)
+    await openDrill(page, 'rate', 1);
+  await page.locator('input[inputmode=decimal]').last().focus();
+  const opener = page.getByRole('button', { name: 'Look at the label' });
+  await opener.click();
+  const sheet = page.getByRole('dialog');
+  const notice = await sheet.getByText('Practice label. Not a real product.').boundingBox();
+  const button = await sheet.getByRole('button', { name: 'Close the label' }).boundingBox();
+  expect(notice?.y).toBeGreaterThan(0);
+  expect((button?.y ?? Infinity) + (button?.height ?? 0)).toBeLessThanOrEqual(phone.height);
+  await page.keyboard.press('Escape');
+  await page.waitForFunction(() => /Look at the label/.test(document.activeElement?.textContent ?? ''));
   await close();
 });
 

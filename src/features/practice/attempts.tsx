@@ -15,9 +15,10 @@ export function Attempts({ part }: { part: PartView }) {
   // What an entry was read as belongs to numbers; a choice and an order stand there as they were given.
   const withReading = part.kind === 'number' || part.kind === 'count';
   useEffect(() => {
-    if (count > shown.current) verdict.current?.focus();
+    // A part left open is no news: the worked solution, asked for, takes the focus.
+    if (count > shown.current && newest?.verdict !== 'blank') verdict.current?.focus();
     shown.current = count;
-  }, [count]);
+  }, [count, newest]);
   return (
     <>
       <div aria-live="polite">

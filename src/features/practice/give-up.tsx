@@ -1,5 +1,5 @@
 import { useStore } from '@nanostores/react';
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { practiceMessages } from '../../i18n/practice.ts';
 import { Button } from '../../ui/button.tsx';
 import { Failure } from '../../ui/failure.tsx';
@@ -10,15 +10,29 @@ export function GiveUp({ problemId }: { problemId: string }) {
   const t = useStore(practiceMessages);
   const [asking, setAsking] = useState(false);
   const giveUp = useGiveUp(problemId);
+  const question = useRef<HTMLElement>(null);
+  const button = useRef<HTMLButtonElement>(null);
+  const wasAsking = useRef(false);
+  useEffect(() => {
+    if (asking) question.current?.focus();
+    else if (wasAsking.current) button.current?.focus();
+    wasAsking.current = asking;
+  }, [asking]);
   if (!asking) {
     return (
-      <Button look="plain" onClick={() => setAsking(true)}>
+      <Button ref={button} look="plain" onClick={() => setAsking(true)}>
         {t.giveUp}
       </Button>
     );
   }
   return (
-    <section aria-label={t.giveUp} className="w-full border-l-4 border-brass bg-brass-wash p-3">
+    <section
+      ref={question}
+      tabIndex={-1}
+      data-quiet-focus=""
+      aria-label={t.giveUp}
+      className="w-full border-l-4 border-brass bg-brass-wash p-3"
+    >
       <p className="mb-2">{t.giveUpAsk}</p>
       <Failure error={giveUp.error} />
       <div className="flex flex-wrap gap-3">

@@ -5,6 +5,9 @@ import { practiceMessages } from '../../i18n/practice.ts';
 import { Button } from '../../ui/button.tsx';
 import { LabelPanel } from '../../ui/label-panel.tsx';
 
+/** The share of the label on the screen from which it counts as seen: its rates stand above its middle. */
+const mostOfIt = 0.75;
+
 /** The label as a sheet that slides over the page, opened from a bar above the phone's bottom bar. */
 function LabelSheet({ label }: { label: LabelView }) {
   const t = useStore(practiceMessages);
@@ -35,14 +38,16 @@ function LabelSheet({ label }: { label: LabelView }) {
   );
 }
 
-/** On phones the label stands above the parts, folded at a press; once it is scrolled away it is one press from the answer. */
+/** On phones the label stands above the parts, folded at a press; once most of it is scrolled away it is one press from the answer. */
 export function LabelOnPhone({ label, floating }: { label: LabelView; floating: boolean }) {
   const t = useStore(practiceMessages);
   const panel = useRef<HTMLDetailsElement>(null);
   const [isSeen, setSeen] = useState(true);
   useEffect(() => {
     if (!panel.current) return undefined;
-    const watch = new IntersectionObserver((entries) => setSeen(entries.at(-1)?.isIntersecting ?? true));
+    const watch = new IntersectionObserver((entries) => setSeen((entries.at(-1)?.intersectionRatio ?? 1) >= mostOfIt), {
+      threshold: [0, mostOfIt],
+    });
     watch.observe(panel.current);
     return () => watch.disconnect();
   }, []);

@@ -168,9 +168,29 @@ test('a later part waits for the one before it', async () => {
 test('the worked solution is asked for once more, and says what it costs', async () => {
   const { user } = open(buildProblemView(), () => null);
   await user.click(screen.getByRole('button', { name: 'Show the worked solution' }));
+  expect(screen.getByRole('region', { name: 'Show the worked solution' })).toHaveFocus();
   expect(screen.getByText(/will count as not answered/)).toBeInTheDocument();
   await user.click(screen.getByRole('button', { name: 'No, keep working' }));
-  expect(screen.getByRole('button', { name: 'Show the worked solution' })).toBeInTheDocument();
+  expect(screen.getByRole('button', { name: 'Show the worked solution' })).toHaveFocus();
+});
+
+test('a worked solution that was asked for takes the focus', async () => {
+  const blank = buildAttempt({ verdict: 'blank', slip: null, headline: 'Left open.' });
+  const line = { html: '', plain: '60 ft × 30 ft = 1,800 sq ft', reason: 'Length times width.', answers: false };
+  const { user } = open(buildProblemView(), () => null);
+  answerFetch(() =>
+    Response.json(
+      buildProblemView({
+        parts: [buildNumberPart({ state: 'closed', attempts: [blank], answerText: '1,600 sq ft' })],
+        working: [line],
+        state: 'done',
+      }),
+    ),
+  );
+  await user.click(screen.getByRole('button', { name: 'Show the worked solution' }));
+  await user.click(screen.getByRole('button', { name: 'Yes, show it' }));
+  await waitFor(() => expect(screen.getByRole('heading', { name: 'Worked solution' })).toHaveFocus());
+  expect(await screen.findByText('Length times width.')).toBeInTheDocument();
 });
 
 test('steps are put in order by keyboard alone, and each move is told', async () => {

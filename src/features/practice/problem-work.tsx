@@ -1,6 +1,6 @@
 import { useStore } from '@nanostores/react';
 import { useQuery } from '@tanstack/react-query';
-import { lazy, Suspense, type ReactNode } from 'react';
+import { lazy, Suspense, useEffect, useRef, useState, type ReactNode } from 'react';
 import type { ProblemView } from '../../../shared/contracts/practice.ts';
 import { ProblemFigure } from '../../figures/problem-figure.tsx';
 import { practiceMessages } from '../../i18n/practice.ts';
@@ -19,11 +19,18 @@ import { problemQuery } from './queries.ts';
 // Formulas need their own style sheet and fonts: fetched only once a solution is shown.
 const WorkingLines = lazy(async () => ({ default: (await import('../../ui/working-lines.tsx')).WorkingLines }));
 
-function Solution({ lines }: { lines: NonNullable<ProblemView['working']> }) {
+/** The worked solution; it takes the focus where it was just asked for. */
+function Solution({ lines, asked }: { lines: NonNullable<ProblemView['working']>; asked: boolean }) {
   const t = useStore(practiceMessages);
+  const heading = useRef<HTMLHeadingElement>(null);
+  useEffect(() => {
+    if (asked) heading.current?.focus();
+  }, [asked]);
   return (
     <section className="border-t border-rule pt-4">
-      <h2 className="mb-2">{t.solution}</h2>
+      <h2 ref={heading} tabIndex={-1} data-quiet-focus="" className="mb-2">
+        {t.solution}
+      </h2>
       <Suspense fallback={<Loading />}>
         <WorkingLines lines={lines} />
       </Suspense>
@@ -34,6 +41,8 @@ function Solution({ lines }: { lines: NonNullable<ProblemView['working']> }) {
 function Worksheet({ problem, compact, after }: { problem: ProblemView; compact: boolean; after?: ReactNode }) {
   const t = useStore(practiceMessages);
   const current = problem.parts.find((part) => part.state === 'open');
+  const [begun] = useState(problem.state);
+  const gaveUp = problem.parts.some((part) => part.attempts.at(-1)?.verdict === 'blank');
   return (
     <Sheet graduated>
       <p className="mb-2 max-w-[38rem] font-serif text-[1.1rem] leading-normal">{problem.statement}</p>
@@ -59,7 +68,7 @@ function Worksheet({ problem, compact, after }: { problem: ProblemView; compact:
           <GiveUp problemId={problem.id} />
         </div>
       )}
-      {problem.working && <Solution lines={problem.working} />}
+      {problem.working && <Solution lines={problem.working} asked={begun === 'open' && gaveUp} />}
       {problem.state === 'done' && after}
     </Sheet>
   );
