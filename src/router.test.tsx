@@ -6,6 +6,7 @@ import { afterEach, expect, test } from 'vitest';
 import type { AccessKey } from '../shared/contracts/access.ts';
 import type { MeView } from '../shared/contracts/account.ts';
 import { answerFetch } from '../tests/support/answer-fetch.ts';
+import { buildProblemView } from '../tests/support/problem-view.ts';
 import { chooseLocale } from './i18n/i18n.ts';
 import { queryClient } from './lib/query-client.ts';
 import { Pages } from './router.tsx';
@@ -105,4 +106,15 @@ test('the first thing the keyboard reaches is the way past the navigation', asyn
   await screen.findByRole('heading', { level: 1 });
   await userEvent.setup().tab();
   expect(screen.getByRole('link', { name: 'Skip to the content' })).toHaveFocus();
+});
+
+test('a problem belongs to the drills in the way through the product', async () => {
+  const problem = buildProblemView();
+  open(`/problems/${problem.id}`, person(), {
+    '/api/levels': () => json(200, []),
+    [`/api/problems/${problem.id}`]: () => json(200, problem),
+  });
+  expect(await screen.findByRole('heading', { level: 1, name: problem.heading })).toBeInTheDocument();
+  expect(screen.getByRole('link', { name: 'Drills' })).toHaveAttribute('aria-current', 'page');
+  expect(screen.getByRole('link', { name: 'Today' })).not.toHaveAttribute('aria-current');
 });

@@ -1,7 +1,7 @@
 import { useStore } from '@nanostores/react';
 import { useQuery } from '@tanstack/react-query';
 import { Suspense, useLayoutEffect } from 'react';
-import { Link, NavLink, Outlet, useLocation } from 'react-router';
+import { Link, Outlet, useLocation } from 'react-router';
 import type { MeView } from '../../shared/contracts/account.ts';
 import { chooseLocale, languageNames, useLocale } from '../i18n/i18n.ts';
 import { shellMessages } from '../i18n/shell.ts';
@@ -16,8 +16,15 @@ import { Broken, PageBoundary } from './broken.tsx';
 const railLink =
   'flex min-h-11 items-center justify-center border-t-[3px] border-transparent px-1 text-[0.8125rem] font-medium text-ink no-underline wide:justify-start wide:border-t-0 wide:border-l-[3px] wide:px-2.5 wide:text-base aria-[current=page]:border-dye aria-[current=page]:bg-dye-wash aria-[current=page]:font-bold';
 
+/** Whether a page lies under a link of the rail; problems belong to the drills. */
+function isUnder(pathname: string, link: string): boolean {
+  const inside = (place: string) => pathname === place || pathname.startsWith(`${place}/`);
+  return inside(link) || (link === paths.drills && inside('/problems'));
+}
+
 function Rail({ me, mailbox }: { me: MeView; mailbox: boolean }) {
   const t = useStore(shellMessages);
+  const { pathname } = useLocation();
   const links = [
     [paths.today, t.today],
     [paths.course, t.course],
@@ -42,9 +49,9 @@ function Rail({ me, mailbox }: { me: MeView; mailbox: boolean }) {
       <ul className="flex justify-around wide:block">
         {links.map(([to, text]) => (
           <li key={to} className="wide:mb-1">
-            <NavLink to={to} className={railLink}>
+            <Link to={to} className={railLink} aria-current={isUnder(pathname, to) ? 'page' : undefined}>
               {text}
-            </NavLink>
+            </Link>
           </li>
         ))}
       </ul>

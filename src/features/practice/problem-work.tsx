@@ -93,7 +93,7 @@ export function ProblemWork({
   if (!problem) return <Loading />;
   const beside = !compact && problem.label !== null;
   return (
-    <div className={beside ? 'grid items-start gap-6 wide:grid-cols-[minmax(0,1fr)_20rem]' : ''}>
+    <div className={beside ? 'grid items-start gap-6 wide:grid-cols-[minmax(0,1fr)_20rem]' : 'max-w-[44rem]'}>
       {/* Another problem in the same place begins with empty fields. */}
       <Worksheet key={problem.id} problem={problem} compact={compact} after={after} />
       {!compact && (
