@@ -33,15 +33,31 @@ export function meet(a: Box, b: Box, room: number): boolean {
   return a.left < b.right + room && a.right > b.left - room && a.top < b.bottom + room && a.bottom > b.top - room;
 }
 
-function line(dimension: PlanDimension<string>, layout: PlanLayout): Omit<PlacedDimension, 'at'> {
-  const normal = outward(dimension);
+type PlacedLine = Omit<PlacedDimension, 'at'>;
+
+/** On which side of the line through `a` and `b` a point lies: positive, negative, or 0 on it. */
+function sideOf(a: Point, b: Point, [x, y]: Point): number {
+  return Math.sign((b[0] - a[0]) * (y - a[1]) - (b[1] - a[1]) * (x - a[0]));
+}
+
+/** Whether two dimension lines run through each other. */
+function cross(a: PlacedLine, b: PlacedLine): boolean {
+  return (
+    sideOf(a.from, a.to, b.from) * sideOf(a.from, a.to, b.to) < 0 &&
+    sideOf(b.from, b.to, a.from) * sideOf(b.from, b.to, a.to) < 0
+  );
+}
+
+function line(dimension: PlanDimension<string>, layout: PlanLayout, turned: 1 | -1): PlacedLine {
+  const [outX, outY] = outward(dimension);
+  const normal: Point = [outX * turned, outY * turned];
   const gap = dimension.place === 'outside' ? dimensionGap : 0;
   const shift = ([x, y]: Point): Point => [x + normal[0] * gap, y + normal[1] * gap];
   return { from: shift(layout.at(dimension.from)), to: shift(layout.at(dimension.to)), normal };
 }
 
 /** Places for a text, best first: beside an upright line, on a level one where it fits, else above or below it. */
-function candidates(dimension: PlanDimension<string>, placed: Omit<PlacedDimension, 'at'>): Point[] {
+function candidates(dimension: PlanDimension<string>, placed: PlacedLine): Point[] {
   const { from, to, normal } = placed;
   const [nx, ny] = normal;
   const width = textWidth(dimension.text);
@@ -59,11 +75,19 @@ function onPaper(box: Box, height: number): boolean {
   return box.left >= 1 && box.right <= drawingWidth - 1 && box.top >= 0 && box.bottom <= height;
 }
 
-/** Places all dimensions of a plan so that no text covers another. */
+/**
+ * Places all dimensions of a plan so that no text covers another and no line runs through another: in a notch, where two would
+ * meet, the second stands on the other side of its edge.
+ */
 export function placeDimensions(dimensions: readonly PlanDimension<string>[], layout: PlanLayout): PlacedDimension[] {
   const taken: Box[] = [];
+  const lines: PlacedLine[] = [];
   return dimensions.map((dimension) => {
-    const placed = line(dimension, layout);
+    const isClear = (own: PlacedLine) => !lines.some((other) => cross(own, other));
+    const pushed = line(dimension, layout, 1);
+    const turned = line(dimension, layout, -1);
+    const placed = isClear(pushed) || !isClear(turned) ? pushed : turned;
+    lines.push(placed);
     const tried = candidates(dimension, placed);
     const free = tried.find((point) => {
       const box = plateBox(point, dimension.text);

@@ -51,6 +51,37 @@ describe('a plan', () => {
       for (const other of all.slice(index + 1)) expect(meet(box, other, 0)).toBe(false);
     });
   });
+  test('two dimensions of a notch do not run through each other', () => {
+    const notched: PlanFigure = {
+      kind: 'plan',
+      width: 65,
+      height: 46,
+      shapes: [
+        {
+          form: 'polygon',
+          points: [
+            [18, 0],
+            [65, 0],
+            [65, 46],
+            [0, 46],
+            [0, 19],
+            [18, 19],
+          ],
+          ground: 'turf',
+        },
+      ],
+      dimensions: [
+        { from: [18, 19], to: [18, 0], text: '19 ft', place: 'outside', side: 'left' },
+        { from: [0, 19], to: [18, 19], text: '18 ft', place: 'outside', side: 'left' },
+      ],
+      alt: 'A lawn with a corner left out.',
+    };
+    const layout = planLayout(notched);
+    const [upright, level] = placeDimensions(notched.dimensions, layout);
+    const [cornerX, cornerY] = layout.at([18, 19]);
+    expect(upright?.from[0]).toBeLessThan(cornerX);
+    expect(level?.from[1]).toBeGreaterThan(cornerY);
+  });
   test('is one picture with a text equivalent, and the text can be opened', () => {
     render(<ProblemFigure figure={lawn} describe="Describe the drawing" />);
     expect(screen.getByRole('img', { name: lawn.alt })).toBeInTheDocument();
