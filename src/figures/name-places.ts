@@ -1,5 +1,5 @@
 import type { PlanShape, Point } from '../../shared/contracts/figure.ts';
-import { meet, plateBox, type Box } from './dimension-places.ts';
+import { meet, plateBox, type Box } from './boxes.ts';
 import type { PlanLayout } from './plan-layout.ts';
 
 /** Kept clear round a smaller shape: its dimension lines and their text stand there. */

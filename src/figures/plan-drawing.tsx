@@ -2,7 +2,8 @@ import type { PlanArrow, PlanDimension, PlanFigure, PlanShape, Point } from '../
 import { DrawingFrame, drawingWidth, textWidth } from './frame.tsx';
 import { groundFill, isHatched, useHatching } from './grounds.tsx';
 import { namePlaces } from './name-places.ts';
-import { meet, placeDimensions, plateBox, type Box, type PlacedDimension } from './dimension-places.ts';
+import { meet, plateBox, type Box } from './boxes.ts';
+import { placeDimensions, type PlacedDimension } from './dimension-places.ts';
 import { planLayout, type PlanLayout } from './plan-layout.ts';
 
 /** Text on a plate of the paper's own color, kept inside the drawing. */
@@ -85,7 +86,7 @@ function Arrow({ arrow, layout, textAt }: { arrow: PlanArrow<string>; layout: Pl
 export function PlanDrawing({ figure }: { figure: PlanFigure }) {
   const layout = planLayout(figure);
   const hatching = useHatching();
-  const placed = placeDimensions(figure.dimensions, layout);
+  const placed = placeDimensions({ dimensions: figure.dimensions, shapes: figure.shapes, layout });
   const texts = placed.map(({ at }, index) => plateBox(at, figure.dimensions[index]?.text ?? ''));
   const names = namePlaces({ shapes: figure.shapes, layout, texts });
   return (
